@@ -1,0 +1,91 @@
+import { BAND_COUNT } from "../bands";
+import { addEnergy, levelOf } from "../levels";
+import { hasBand, maskWhere, NO_BANDS, type BandMask } from "../model/masks";
+import type { Part } from "../sound/parts";
+import { toOut, toOutSpectrum, type PathVerdict } from "../verdict";
+import type { Weighing } from "./weighing";
+
+/** Ways that a reader sees as one: an element, a source, a mouth, or all leaks of a building. */
+export interface Way {
+  readonly id: string;
+  readonly parts: readonly Part[];
+  readonly energy: Float64Array;
+}
+
+const LEAST = 1e-12;
+
+function groupIdOf({ id, kind, element }: Part): string {
+  return kind === "leak" && element ? `leaks:${element.building}` : id;
+}
+
+/** Ways by the thing sound leaves by, loudest at the leading band (or in the weighted total) first. */
+export function waysOf(weighing: Weighing): Way[] {
+  const groups = new Map<string, Part[]>();
+  for (const part of weighing.parts.ways) {
+    const id = groupIdOf(part);
+    groups.set(id, [...(groups.get(id) ?? []), part]);
+  }
+  const ways = [...groups].map(([id, parts]): Way => {
+    const energy = new Float64Array(BAND_COUNT);
+    parts.forEach((part) => addEnergy(energy, part.energy));
+    return { id, parts, energy };
+  });
+  return ways.filter((way) => unknownOf(weighing, way) !== NO_BANDS || way.energy.some((each) => each > 0)).sort(
+    (a, b) => rankOf(weighing, b.energy) - rankOf(weighing, a.energy),
+  );
+}
+
+/** What of an energy counts where the listener is weighed: the leading band, or the weighted total. */
+export function rankOf({ total, leading }: Pick<Weighing, "total" | "leading">, energy: Float64Array): number {
+  if (total) return weightedSum(energy, total.factors);
+  return leading < 0 ? 0 : energy[leading];
+}
+
+function weightedSum(energy: Float64Array, factors: Float64Array): number {
+  let sum = 0;
+  for (let band = 0; band < BAND_COUNT; band += 1) sum += factors[band] * energy[band];
+  return sum;
+}
+
+/** Bands in which a way's own figure is not known. */
+function unknownOf({ unknown }: Weighing, { parts, energy }: Way): BandMask {
+  const own = parts.reduce((mask, { element }) => mask | (element?.unknown ?? 0), 0);
+  return unknown & (own | maskWhere((band) => energy[band] === 0));
+}
+
+function estimatedOf({ parts }: Way): BandMask {
+  return parts.reduce((mask, { element, source }) => mask | (element?.estimated ?? 0) | (source?.estimated ? ~0 : 0), 0);
+}
+
+/** What is left of `whole` without `part`; what only rounding leaves is silence. */
+function remainder(whole: number, part: number): number {
+  const left = whole - part;
+  return left > LEAST * whole ? left : 0;
+}
+
+const shareOf = (part: number, whole: number): number => (whole > 0 ? Math.min(1, part / whole) : 0);
+
+function weightedPath({ total, energy }: Weighing, way: Way): PathVerdict["weighted"] {
+  if (!total) return null;
+  const [part, whole] = [weightedSum(way.energy, total.factors), weightedSum(energy, total.factors)];
+  const without = total.unknown ? NaN : levelOf(remainder(whole, part));
+  return { level: toOut(levelOf(part)), share: shareOf(part, whole), without: toOut(without) };
+}
+
+export function pathVerdict(weighing: Weighing, way: Way): PathVerdict {
+  const { energy, unknown } = weighing;
+  const [first] = way.parts;
+  const isGroup = way.id !== first.id;
+  const ownUnknown = unknownOf(weighing, way);
+  return {
+    id: way.id,
+    kind: first.kind,
+    partId: isGroup ? null : first.kind === "in the room" ? (first.source?.source.id ?? null) : first.id,
+    name: isGroup ? "Leaks" : first.name,
+    levels: toOutSpectrum(way.energy.map((each, band) => (hasBand(ownUnknown, band) ? NaN : levelOf(each)))),
+    shares: Array.from(way.energy, (each, band) => shareOf(each, energy[band])),
+    without: toOutSpectrum(way.energy.map((each, band) => (hasBand(unknown, band) ? NaN : levelOf(remainder(energy[band], each))))),
+    weighted: weightedPath(weighing, way),
+    estimated: Array.from(way.energy, (_, band) => hasBand(estimatedOf(way), band)),
+  };
+}

@@ -1,0 +1,12 @@
+export { combineLimit, composite, gapCombined, type Part } from "./composite";
+export {
+  connectionSchema,
+  descriptionSchema,
+  leafSchema,
+  type Connection,
+  type Description,
+  type LeafDescription,
+} from "./description";
+export type { TransmissionFacts } from "./modelOf";
+export { transmissionCached } from "./transmissionCached";
+export { transmissionOf, type Transmission } from "./transmissionOf";
