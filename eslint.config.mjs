@@ -13,7 +13,7 @@ const defaultExported = [
 ];
 
 export default defineConfig([
-  globalIgnores([".next/**", ".next-test/**", ".stillyard/**", "node_modules/**", "next-env.d.ts", "coverage/**"]),
+  globalIgnores([".next*/**", ".stillyard/**", "node_modules/**", "next-env.d.ts", "coverage/**"]),
   ...nextVitals,
   ...nextTypescript,
   {

@@ -68,7 +68,8 @@ function multiplyTransposed(matrix: Float64Array, size: number): void {
       matrix[i * size + j] = sum;
     }
   }
-  for (let i = 0; i < size; i += 1) for (let j = 0; j < i; j += 1) matrix[j * size + i] = matrix[i * size + j];
+  for (let i = 0; i < size; i += 1)
+    for (let j = 0; j < i; j += 1) matrix[j * size + i] = matrix[i * size + j];
 }
 
 function diagonalOf(absorption: readonly Float64Array[], links: readonly Link[]): Float64Array {
@@ -96,12 +97,18 @@ export function balanceRooms(absorption: readonly Float64Array[], links: readonl
   for (const group of new Set(groups)) {
     const rooms = Array.from(groups.keys()).filter((i) => groups[i] === group);
     const inside = links.filter(({ from, to }) => from >= 0 && to >= 0 && groups[from] === group);
-    for (let band = 0; band < BAND_COUNT; band += 1) invertGroup({ count, groups, diagonal, inverse }, band, rooms, inside);
+    for (let band = 0; band < BAND_COUNT; band += 1)
+      invertGroup({ count, groups, diagonal, inverse }, band, rooms, inside);
   }
   return { count, groups, diagonal, inverse };
 }
 
-function invertGroup({ count, diagonal, inverse }: Balance, band: number, rooms: readonly number[], links: readonly Link[]): void {
+function invertGroup(
+  { count, diagonal, inverse }: Balance,
+  band: number,
+  rooms: readonly number[],
+  links: readonly Link[],
+): void {
   const known = rooms.filter((i) => diagonal[band * count + i] > 0);
   const size = known.length;
   const place = new Map(known.map((room, i) => [room, i]));
@@ -114,5 +121,7 @@ function invertGroup({ count, diagonal, inverse }: Balance, band: number, rooms:
     matrix[j * size + i] -= passing[band];
   }
   invertInPlace(matrix, size);
-  known.forEach((a, i) => known.forEach((b, j) => (inverse[(band * count + a) * count + b] = matrix[i * size + j])));
+  known.forEach((a, i) =>
+    known.forEach((b, j) => (inverse[(band * count + a) * count + b] = matrix[i * size + j])),
+  );
 }

@@ -24,7 +24,9 @@ function mapValues<T>(record: Record<string, T>, answer: (value: T) => unknown):
 function answerBudget(document: unknown): Record<string, unknown> {
   const { plan, length } = readBudget(document);
   const { receivers } = solve(plan, { contributions: Infinity });
-  return Object.fromEntries(receivers.map((verdict) => [verdict.receiverId, answerReceiver(verdict, length)]));
+  return Object.fromEntries(
+    receivers.map((verdict) => [verdict.receiverId, answerReceiver(verdict, length)]),
+  );
 }
 
 /**
@@ -32,12 +34,16 @@ function answerBudget(document: unknown): Record<string, unknown> {
  * Throws `CaseFault` for what is malformed, names nothing, or is not built.
  */
 export function answerCase(document: unknown): Record<string, unknown> {
-  if (typeof document !== "object" || document === null || Array.isArray(document)) throw new CaseFault("a case document is one object", "");
+  if (typeof document !== "object" || document === null || Array.isArray(document))
+    throw new CaseFault("a case document is one object", "");
   if ("receivers" in document) return answerBudget(document);
   if ("constructions" in document) {
-    return mapValues(readWith(constructionsSchema, document).constructions, ({ construction }) => answerDescription(construction));
+    return mapValues(readWith(constructionsSchema, document).constructions, ({ construction }) =>
+      answerDescription(construction),
+    );
   }
-  if ("tl" in document) throw new CaseFault("single-number ratings of transmission loss are not built yet", "tl");
+  if ("tl" in document)
+    throw new CaseFault("single-number ratings of transmission loss are not built yet", "tl");
   if ("spectra" in document) {
     bandLengthOf(document);
     return mapValues(readWith(spectraSchema, document).spectra, ({ levels }) => answerSpectrum(levels));

@@ -5,7 +5,13 @@ import type { Criterion } from "./plan";
 import { provenanceSchema, toArithmetic } from "./spectrum";
 
 const bandsSchema = z.array(z.number()).refine((bands) => bands.every((band, i) => band === OCTAVE_BANDS[i]));
-const shared = { key: z.string(), label: z.string(), unit: z.string(), bands: bandsSchema, provenance: provenanceSchema };
+const shared = {
+  key: z.string(),
+  label: z.string(),
+  unit: z.string(),
+  bands: bandsSchema,
+  provenance: provenanceSchema,
+};
 const level = z.number().nullable();
 const familySchema = z.strictObject({
   ...shared,
@@ -33,7 +39,10 @@ const SAME = 1e-9;
 
 function familyOf(edition: string): Family {
   const { curves } = families.find(({ key }) => key === edition) ?? families[0];
-  return { ratings: curves.map(({ rating }) => rating), levels: curves.map(({ levels }) => toArithmetic(levels)) };
+  return {
+    ratings: curves.map(({ rating }) => rating),
+    levels: curves.map(({ levels }) => toArithmetic(levels)),
+  };
 }
 const kept = new Map<string, Family>();
 function keptFamily(edition: string): Family {
@@ -42,24 +51,29 @@ function keptFamily(edition: string): Family {
   return family;
 }
 
-/** NC of one band: linear between tabulated curves, parallel shift below the lowest, +Infinity above the highest. */
+/** NC of one band: linear between tabulated curves, parallel shift below the lowest and, to rank the bands, above the highest. */
 function ncOfBand({ ratings, levels }: Family, sound: number, band: number): number {
   const last = levels.length - 1;
   if (Number.isNaN(levels[0][band])) return -Infinity;
   if (sound < levels[0][band]) return ratings[0] - (levels[0][band] - sound);
-  if (sound > levels[last][band]) return Infinity;
-  const upper = Math.max(1, levels.findIndex((curve) => sound <= curve[band]));
+  if (sound > levels[last][band]) return ratings[last] + sound - levels[last][band];
+  const upper = Math.max(
+    1,
+    levels.findIndex((curve) => sound <= curve[band]),
+  );
   const [low, high] = [levels[upper - 1][band], levels[upper][band]];
   return ratings[upper - 1] + ((ratings[upper] - ratings[upper - 1]) * (sound - low)) / (high - low);
 }
 
 /**
  * Noise criterion by tangency (ANSI/ASA S12.2 5.2.3) of nine octave levels, dB. Bands that the edition does not hold
- * (31.5 Hz of the classic family) do not count. Below the lowest curve the value is the parallel shift.
+ * (31.5 Hz of the classic family) do not count. Below the lowest curve the value is the parallel shift; above the
+ * highest no number is defined, and the band is the one that exceeds the highest curve most.
  */
 export function ncOf(levels: ArrayLike<number>, edition = NC_EDITIONS[0]): Rating {
   const family = keptFamily(edition);
-  return highest(levels, (sound, band) => ncOfBand(family, sound, band));
+  const { value, band } = highest(levels, (sound, i) => ncOfBand(family, sound, i));
+  return { value: value > family.ratings[family.ratings.length - 1] + SAME ? Infinity : value, band };
 }
 
 /** Noise rating (ISO/R 1996:1971) of nine octave levels, dB: the highest of (L - a)/b. */
@@ -72,7 +86,8 @@ function highest(levels: ArrayLike<number>, rate: (sound: number, band: number) 
   for (let i = 0; i < BAND_COUNT; i += 1) {
     if (Number.isNaN(levels[i])) return { value: NaN, band: null };
     const value = rate(levels[i], i);
-    if (value > best.value + SAME || (best.band === null && value > -Infinity)) Object.assign(best, { value, band: OCTAVE_BANDS[i] });
+    if (value > best.value + SAME || (best.band === null && value > -Infinity))
+      Object.assign(best, { value, band: OCTAVE_BANDS[i] });
   }
   return best;
 }
@@ -85,7 +100,9 @@ export function ncLevels(rating: number, edition = NC_EDITIONS[0]): Float64Array
   if (rating >= ratings[last]) return levels[last].map((of) => of + (rating - ratings[last]));
   const upper = ratings.findIndex((each) => rating <= each);
   const share = (rating - ratings[upper - 1]) / (ratings[upper] - ratings[upper - 1]);
-  return levels[upper].map((high, band) => levels[upper - 1][band] + share * (high - levels[upper - 1][band]));
+  return levels[upper].map(
+    (high, band) => levels[upper - 1][band] + share * (high - levels[upper - 1][band]),
+  );
 }
 
 /** Levels of the NR curve of that number, dB. */

@@ -1,10 +1,28 @@
 import type { Way } from "./answer/paths";
-import { leavingStation, listenerStation, sourceStation, windowStation, yardStation, type Walk } from "./answer/stations";
+import {
+  leavingStation,
+  listenerStation,
+  sourceStation,
+  windowStation,
+  yardStation,
+  type Walk,
+} from "./answer/stations";
 import type { Weighing } from "./answer/weighing";
 import { leadingSource } from "./facts";
 import type { SourceModel } from "./model/sourceModels";
 import { crossing, type Place } from "./outdoors/barrier";
-import { alongOf, besideOf, cornersOf, cutOutline, movedThrough, placeAt, sectionThrough, shellOutline, type Section, type Stretch } from "./outdoors/section";
+import {
+  alongOf,
+  besideOf,
+  cornersOf,
+  cutOutline,
+  movedThrough,
+  placeAt,
+  sectionThrough,
+  shellOutline,
+  type Section,
+  type Stretch,
+} from "./outdoors/section";
 import type { Building, Plan, Receiver, Space } from "./plan";
 import type { Field } from "./sound/field";
 import type { SpreadFrom } from "./sound/unknowns";
@@ -37,7 +55,10 @@ function sourcePlace({ rooms }: Field, { source, injections, emissions }: Source
   return middle ?? source.position ?? emissions.find(({ at }) => at)?.at ?? null;
 }
 
-function listenerPlace({ rooms }: Field, { room, receiver }: { room: number; receiver: Receiver }): Place | null {
+function listenerPlace(
+  { rooms }: Field,
+  { room, receiver }: { room: number; receiver: Receiver },
+): Place | null {
   return receiver.position ?? (room >= 0 ? middleOf(rooms[room].space.box) : null);
 }
 
@@ -55,15 +76,29 @@ function outlineOf(building: Building, spaces: readonly Space[]): readonly (read
 
 function topOf({ eaves, ridge, ridgeAxis }: Building, spaces: readonly Space[]): number {
   const ceilings = spaces.flatMap(({ box }) => (box ? [box.at[2] + box.size[2]] : []));
-  return Math.max(eaves ?? 0, ridgeAxis === null ? (ridge ?? 0) : 0) || Math.max(0, ...ceilings) + OVER_CEILING;
+  return (
+    Math.max(eaves ?? 0, ridgeAxis === null ? (ridge ?? 0) : 0) || Math.max(0, ...ceilings) + OVER_CEILING
+  );
 }
 
 function openingsOf({ elements }: Field, buildingId: string, section: Section): Shell["openings"] {
   return elements.flatMap(({ element, kind, building, face }) => {
     if (building !== buildingId || !face || !["door", "window", "duct", "leak"].includes(kind)) return [];
-    if (face.normal && Math.abs(face.normal[0] * section.direction[0] + face.normal[1] * section.direction[1]) < FACING) return [];
+    if (
+      face.normal &&
+      Math.abs(face.normal[0] * section.direction[0] + face.normal[1] * section.direction[1]) < FACING
+    )
+      return [];
     const half = (face.size?.[1] ?? Math.sqrt(element.area)) / 2;
-    return [{ elementId: element.id, kind, along: alongOf(section, face.at), foot: face.at[2] - half, head: face.at[2] + half }];
+    return [
+      {
+        elementId: element.id,
+        kind,
+        along: alongOf(section, face.at),
+        foot: face.at[2] - half,
+        head: face.at[2] + half,
+      },
+    ];
   });
 }
 
@@ -71,7 +106,15 @@ function openingsOf({ elements }: Field, buildingId: string, section: Section): 
 function roomsOf(section: Section, spaces: readonly Space[], { shown, lit }: Ends): Shell["rooms"] {
   return spaces.flatMap(({ id, box }) => {
     if (!box || !(shown.has(id) || cutOutline(section, cornersOf(box)))) return [];
-    return [{ id, ...stretchOf(section, cornersOf(box)), floor: box.at[2], ceiling: box.at[2] + box.size[2], lit: id === lit }];
+    return [
+      {
+        id,
+        ...stretchOf(section, cornersOf(box)),
+        floor: box.at[2],
+        ceiling: box.at[2] + box.size[2],
+        lit: id === lit,
+      },
+    ];
   });
 }
 
@@ -113,7 +156,9 @@ function treesOf({ lot }: Plan, section: Section): CrossCut["trees"] {
 /** The nearest fence between the source and the listener, the listener's own line included. */
 function fenceStation(walk: Walk, fences: CrossCut["fences"]): CrossCut["stations"] {
   const reach = alongOf(walk.section, walk.listener);
-  const between = fences.filter(({ along }) => along > 0 && along <= reach + BEYOND / 2).sort((a, b) => b.height - a.height);
+  const between = fences
+    .filter(({ along }) => along > 0 && along <= reach + BEYOND / 2)
+    .sort((a, b) => b.height - a.height);
   return between.slice(0, 1).map(({ id, along }) => yardStation(walk, id, placeAt(walk.section, along, EAR)));
 }
 
@@ -125,7 +170,12 @@ function present<T>(values: readonly (T | null)[]): T[] {
  * The two yards cut open: the vertical plane through the centre of the loudest source's room and the listener, with what
  * lies off the plane projected onto it, and the levels on the way (solver method 6). Null where a place is not known.
  */
-export function crossCutOf(field: Field, weighing: Weighing, ways: readonly Way[], spread: SpreadFrom | null): CrossCut | null {
+export function crossCutOf(
+  field: Field,
+  weighing: Weighing,
+  ways: readonly Way[],
+  spread: SpreadFrom | null,
+): CrossCut | null {
   const source = leadingSource(weighing)?.source;
   const from = source && sourcePlace(field, source);
   const listener = listenerPlace(field, weighing.hearing);

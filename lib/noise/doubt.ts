@@ -27,7 +27,8 @@ function carriers({ sources, ways, entering }: Parts): Part[] {
 export function doubtsOf(parts: Parts, energy: Float64Array): Float64Array {
   const squares = new Float64Array(BAND_COUNT);
   for (const part of carriers(parts)) {
-    for (let band = 0; band < BAND_COUNT; band += 1) squares[band] += (part.energy[band] * deviationOf(part, band)) ** 2;
+    for (let band = 0; band < BAND_COUNT; band += 1)
+      squares[band] += (part.energy[band] * deviationOf(part, band)) ** 2;
   }
   return squares.map((sum, band) => {
     if (energy[band] === 0) return NO_ENERGY;
@@ -39,17 +40,21 @@ export function doubtsOf(parts: Parts, energy: Float64Array): Float64Array {
 export function doubtParts(parts: Parts, energy: Float64Array, band: number): Doubt[] {
   const whole = energy[band];
   if (whole === 0) return [];
-  const carried = carriers(parts).map(
-    (part): Doubt => ({
-      what: part.what,
-      partId: part.id,
-      name: part.name,
-      basis: basisOf(part, band),
-      decibels: (part.energy[band] / whole) * deviationOf(part, band),
-    }),
-  );
+  const carried = carriers(parts).map((part): Doubt => ({
+    what: part.what,
+    partId: part.id,
+    name: part.name,
+    basis: basisOf(part, band),
+    decibels: (part.energy[band] / whole) * deviationOf(part, band),
+  }));
   const outdoors = (parts.outdoors[band] / whole) * OUTDOOR_DEVIATION;
-  const travel: Doubt = { what: "outdoors", partId: null, name: "the way outdoors", basis: "calculated", decibels: outdoors };
+  const travel: Doubt = {
+    what: "outdoors",
+    partId: null,
+    name: "the way outdoors",
+    basis: "calculated",
+    decibels: outdoors,
+  };
   return [...carried, travel].filter(({ decibels }) => decibels > 0).sort((a, b) => b.decibels - a.decibels);
 }
 

@@ -33,14 +33,23 @@ function nearestKnown(loss: Float64Array, band: number): number {
 }
 
 /** How far a band lies from its nearest measured one, dB; NaN where the method has no rule (solver method 0). */
-function extensionFrom(construction: Construction, model: readonly number[] | null, band: number, nearest: number): number {
+function extensionFrom(
+  construction: Construction,
+  model: readonly number[] | null,
+  band: number,
+  nearest: number,
+): number {
   if (model) return model[band] - model[nearest];
   if (countLeaves(construction) !== 1) return NaN;
   return nearest > band ? LEAF_SLOPE * (nearest - band) : 0;
 }
 
 /** A laboratory spectrum with its missing bands extended, marked estimated. */
-function extended(construction: Construction, tl: Spectrum, model: readonly number[] | null): Pick<EffectiveLoss, "loss" | "bases"> {
+function extended(
+  construction: Construction,
+  tl: Spectrum,
+  model: readonly number[] | null,
+): Pick<EffectiveLoss, "loss" | "bases"> {
   const measured = lossOf(tl);
   const loss = measured.slice();
   const bases = Array.from(measured, (_, band): Basis => construction.bases?.[band] ?? "laboratory");
@@ -53,7 +62,10 @@ function extended(construction: Construction, tl: Spectrum, model: readonly numb
   return { loss, bases };
 }
 
-function calculated(octave: readonly number[], { estimatedBelow }: TransmissionFacts): Pick<EffectiveLoss, "loss" | "bases"> {
+function calculated(
+  octave: readonly number[],
+  { estimatedBelow }: TransmissionFacts,
+): Pick<EffectiveLoss, "loss" | "bases"> {
   const bases = EXACT_BANDS.map((band): Basis => (band < estimatedBelow ? "estimated" : "calculated"));
   return { loss: Float64Array.from(octave), bases };
 }
@@ -70,7 +82,11 @@ export function effectiveLoss(construction: Construction): EffectiveLoss {
   const description = describeLayers(construction);
   const model = description && transmissionCached(description);
   const { tl } = construction;
-  const spectrum = tl ? extended(construction, tl, model?.octave ?? null) : model ? calculated(model.octave, model.facts) : unknownLoss();
+  const spectrum = tl
+    ? extended(construction, tl, model?.octave ?? null)
+    : model
+      ? calculated(model.octave, model.facts)
+      : unknownLoss();
   return {
     ...spectrum,
     surfaceMass: massOf(construction) ?? model?.facts.surfaceMass ?? null,

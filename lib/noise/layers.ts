@@ -78,7 +78,11 @@ function readLayers({ layers, size, use }: Construction): Description | null {
   if (!stack || stack.leaves.length === 0 || stack.leaves.length > 2) return null;
   const isDouble = stack.leaves.length === 2;
   const shape = isDouble ? doubleOf(stack) : { kind: "single", leaf: leafOf(stack.leaves[0]) };
-  const reading = descriptionSchema.safeParse({ ...shape, ...(size && { size }), ...(isDouble && use && { use }) });
+  const reading = descriptionSchema.safeParse({
+    ...shape,
+    ...(size && { size }),
+    ...(isDouble && use && { use }),
+  });
   return reading.success ? reading.data : null;
 }
 
@@ -91,7 +95,10 @@ export function countLeaves({ layers, description }: Construction): number {
 /** Surface mass of all boards, kg/m2, those outside a ventilated gap too; null where a material is not in the table. */
 export function massOf({ layers }: Construction): number | null {
   const boards = layers.filter((layer) => layer.kind === "board");
-  const mass = boards.reduce((sum, { material, thickness }) => sum + (findMaterial(material)?.density ?? NaN) * thickness, 0);
+  const mass = boards.reduce(
+    (sum, { material, thickness }) => sum + (findMaterial(material)?.density ?? NaN) * thickness,
+    0,
+  );
   return boards.length === 0 || Number.isNaN(mass) ? null : mass;
 }
 

@@ -24,23 +24,12 @@ export function noEnergy(): Float64Array {
   return new Float64Array(BAND_COUNT);
 }
 
-/** Energies to levels, band by band; no energy is silence. */
-export function levelsOf(energies: Float64Array): Float64Array {
-  return energies.map(levelOf);
-}
-
 /** Adds `share` times `part` to `sum`, in place. */
 export function addEnergy(sum: Float64Array, part: Float64Array, share = 1): void {
   for (let band = 0; band < BAND_COUNT; band += 1) sum[band] += share * part[band];
 }
 
-export function sumOf(energies: Float64Array): number {
-  let sum = 0;
-  for (let band = 0; band < energies.length; band += 1) sum += energies[band];
-  return sum;
-}
-
 /** Drop in dB when a part with that share of the energy falls silent; a whole is shown as 99. */
 export function dropWithout(share: number): number {
-  return Math.min(99, -10 * Math.log10(Math.max(0, 1 - share)));
+  return share > 0 ? Math.min(99, -10 * Math.log10(Math.max(0, 1 - share))) : 0;
 }

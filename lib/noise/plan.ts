@@ -2,7 +2,7 @@ import { z } from "zod";
 import { constructionSchema } from "./construction";
 import { elementSchema } from "./elements";
 import { sourceSchema } from "./sources";
-import { areaSpectrum, basesSchema, coefficientSpectrum, decaySpectrum, levelSpectrum, provenanceSchema } from "./spectrum";
+import { areaSpectrum, basesSchema, coefficientSpectrum, decaySpectrum, levelSpectrum, objectAreaSpectrum, provenanceSchema } from "./spectrum";
 import { runSchema } from "./ducts/run";
 
 /**
@@ -51,7 +51,7 @@ export const absorptionSchema = z.discriminatedUnion("kind", [
     kind: z.literal("surfaces"),
     model: z.enum(["sabine", "eyring"]),
     air: z.boolean(),
-    objects: z.array(z.object({ name: z.string().max(120), area: areaSpectrum })).max(40),
+    objects: z.array(z.object({ name: z.string().max(120), area: objectAreaSpectrum })).max(40),
   }),
 ]);
 

@@ -4,7 +4,13 @@ import finishRecords from "../../data/finishes.json";
 import sourceRecords from "../../data/sources.json";
 import { criterionSchema } from "./plan";
 import { sourceKinds, type SourceKindName } from "./sources";
-import { basesSchema, coefficientSpectrum, deviationSpectrum, levelSpectrum, provenanceSchema } from "./spectrum";
+import {
+  basesSchema,
+  coefficientSpectrum,
+  deviationSpectrum,
+  levelSpectrum,
+  provenanceSchema,
+} from "./spectrum";
 
 export { catalogue, findConstruction, type CatalogueConstruction } from "./catalogue";
 
@@ -24,8 +30,16 @@ const sourceRecordSchema = z.object({
   basis: z.literal("estimated"),
   provenance: provenanceSchema,
 });
-const finishRecordSchema = z.object({ key, name, alpha: coefficientSpectrum, bases: basesSchema, provenance: provenanceSchema });
-const criterionRecordSchema = criterionSchema.omit({ id: true, receiverId: true }).extend({ key, says: z.string() });
+const finishRecordSchema = z.object({
+  key,
+  name,
+  alpha: coefficientSpectrum,
+  bases: basesSchema,
+  provenance: provenanceSchema,
+});
+const criterionRecordSchema = criterionSchema
+  .omit({ id: true, receiverId: true })
+  .extend({ key, says: z.string() });
 
 /** Sources whose figures were read or estimated somewhere. A record that does not fit throws when first loaded. */
 export const sourceLibrary = z.array(sourceRecordSchema).parse(sourceRecords.records);

@@ -55,7 +55,10 @@ function fromSurfaces(space: Space, surfaces: readonly Surface[], lot: Lot): Flo
   const { absorption, volume } = space;
   if (absorption.kind !== "surfaces") throw new Error("a space without surfaces");
   const own = surfaces.filter(({ spaceId }) => spaceId === space.id);
-  const total = surfaceArea(own.map(({ area, alpha }) => ({ area, alpha: filled(alpha) })), absorption.model);
+  const total = surfaceArea(
+    own.map(({ area, alpha }) => ({ area, alpha: filled(alpha) })),
+    absorption.model,
+  );
   for (const { area } of absorption.objects) filled(area).forEach((each, band) => (total[band] += each));
   if (absorption.air) {
     airArea(volume, lot.indoorTemperature, lot.indoorHumidity).forEach((each, band) => (total[band] += each));
@@ -68,7 +71,9 @@ export function absorptionOf(space: Space, surfaces: readonly Surface[], lot: Lo
   const { absorption, volume } = space;
   if (absorption.kind === "area") return filled(absorption.area);
   if (absorption.kind === "decay") {
-    return Float64Array.from(absorption.seconds, (seconds) => (seconds === null ? NaN : areaFromDecay(volume, seconds)));
+    return Float64Array.from(absorption.seconds, (seconds) =>
+      seconds === null ? NaN : areaFromDecay(volume, seconds),
+    );
   }
   return fromSurfaces(space, surfaces, lot).map((area) => (area > 0 ? area : NaN));
 }

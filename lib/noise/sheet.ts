@@ -18,10 +18,12 @@ export interface ConstructionSheet {
   /** One line for the builder; empty for a construction of the project's own. */
   says: string;
   layers: SheetLayer[];
-  /** dB per band, what each figure rests on, and one standard deviation, dB. */
+  /** dB per band of the construction alone, what each figure rests on, and one standard deviation, dB. */
   loss: OutSpectrum;
   bases: Basis[];
   doubts: number[];
+  /** dB per band in the place of one element, with its gap or open part; only where a page is about that element. */
+  hung?: OutSpectrum;
   /** kg/m², boards alone, and m; null where the layers do not say. */
   surfaceMass: number | null;
   thickness: number | null;
@@ -37,14 +39,17 @@ export interface ConstructionSheet {
  * The sheet of a construction of a plan or of the catalogue: layers, loss in dB over the nine bands with its doubt, mass
  * in kg/m² and thickness in m. Pure, and total for every construction that passes its schema. Solver method, section 2.
  */
-export function sheetOf(construction: Construction, { key = construction.id, says = "" } = {}): ConstructionSheet {
+export function sheetOf(
+  construction: Construction,
+  { key = construction.id, says = "" } = {},
+): ConstructionSheet {
   const { loss, bases, surfaceMass, thickness, facts } = effectiveLoss(construction);
   return {
     key,
     says,
     name: construction.name,
     layers: sheetLayersOf(construction),
-    loss: Array.from(loss, wordOf),
+    loss: toOutLoss(loss),
     bases: [...bases],
     doubts: bases.map(elementDeviation),
     surfaceMass,
@@ -54,6 +59,11 @@ export function sheetOf(construction: Construction, { key = construction.id, say
     joints: construction.layers.flatMap((layer) => (layer.kind === "cavity" ? [layer.connection] : [])),
     provenance: construction.provenance,
   };
+}
+
+/** Losses as they leave the core: NaN is unknown, and what lets nothing pass is silent. */
+export function toOutLoss(losses: ArrayLike<number>): OutSpectrum {
+  return Array.from(losses, wordOf);
 }
 
 function wordOf(loss: number): Out {

@@ -3,8 +3,17 @@ import { findMaterial } from "./materials";
 
 /** How a layer is drawn in a section. */
 export type LayerLook =
-  | "board" | "sheathing" | "cladding" | "timber" | "glass" | "masonry" | "metal" | "compound"
-  | "frame" | "gap" | "vented";
+  | "board"
+  | "sheathing"
+  | "cladding"
+  | "timber"
+  | "glass"
+  | "masonry"
+  | "metal"
+  | "compound"
+  | "frame"
+  | "gap"
+  | "vented";
 
 /** A stud, joist or rafter cut across: depth through the wall and width along it, m; the leaf it stands against. */
 export interface CutStud {
@@ -45,7 +54,9 @@ export function sheetLayersOf({ layers, fits }: Pick<Construction, "layers" | "f
   return layers.flatMap((layer): SheetLayer[] => {
     if (layer.kind === "board") return boardLayers(layer);
     if (layer.kind === "cavity") return cavityLayers(layer, rows);
-    return [{ ...plain, name: layer.name || "Gap, open to the air", look: "vented", thickness: layer.thickness }];
+    return [
+      { ...plain, name: layer.name || "Gap, open to the air", look: "vented", thickness: layer.thickness },
+    ];
   });
 }
 
@@ -94,7 +105,8 @@ function separateRows(cavity: Cavity, names: [string, string], clear: number): S
   const rows = cavity.studs.map(({ depth, width }, row): SheetLayer => {
     const fill = Math.min(depth, wool);
     wool -= fill;
-    const against = cavity.studs.length === 2 ? (row === 0 ? "yard" : "room") : clear > DUST ? "yard" : "both";
+    const against =
+      cavity.studs.length === 2 ? (row === 0 ? "yard" : "room") : clear > DUST ? "yard" : "both";
     return frameRow({ name: names[row] ?? names[0], depth, width, fill, studs: [{ depth, width, against }] });
   });
   if (clear <= DUST) return rows;
@@ -116,11 +128,20 @@ function interlockedRow(cavity: Cavity, name: string): SheetLayer {
     depth: cavity.thickness,
     width: first.width,
     fill: cavity.fill,
-    studs: [{ ...first, against: "yard" }, { ...second, against: "room" }],
+    studs: [
+      { ...first, against: "yard" },
+      { ...second, against: "room" },
+    ],
   });
 }
 
-function frameRow(row: { name: string; depth: number; width: number; fill: number; studs: CutStud[] }): SheetLayer {
+function frameRow(row: {
+  name: string;
+  depth: number;
+  width: number;
+  fill: number;
+  studs: CutStud[];
+}): SheetLayer {
   const size = `${millimetres(row.studs[0].depth)} × ${millimetres(row.width)}`;
   return {
     ...plain,

@@ -13,6 +13,8 @@ export const levelSpectrum = overBands(-100, 160);
 export const lossSpectrum = overBands(-20, 150);
 /** Absorption areas over the nine bands, m2. */
 export const areaSpectrum = z.array(z.union([z.number().min(0.01).max(10_000), z.null()])).length(BAND_COUNT);
+/** Absorption areas of things in a room over the nine bands, m2; a thing may take nothing in a band. */
+export const objectAreaSpectrum = z.array(z.union([z.number().min(0).max(10_000), z.null()])).length(BAND_COUNT);
 /** Decay times over the nine bands, s. */
 export const decaySpectrum = z.array(z.union([z.number().min(0.02).max(30), z.null()])).length(BAND_COUNT);
 /** Absorption coefficients over the nine bands. Laboratory values above 1 are as printed. */

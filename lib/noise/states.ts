@@ -20,11 +20,15 @@ export interface Weighed {
 export function compareWeighed(a: Weighed, b: Weighed): number {
   const rank = STATES.indexOf(a.state) - STATES.indexOf(b.state);
   if (rank !== 0) return rank;
-  if (Number.isNaN(a.margin) || Number.isNaN(b.margin)) return Number(Number.isNaN(a.margin)) - Number(Number.isNaN(b.margin));
+  if (Number.isNaN(a.margin) || Number.isNaN(b.margin))
+    return Number(Number.isNaN(a.margin)) - Number(Number.isNaN(b.margin));
   return a.margin === b.margin ? 0 : a.margin - b.margin;
 }
 
 /** The one that leads; undefined of none. */
 export function leadingOf<T extends Weighed>(all: readonly T[]): T | undefined {
-  return all.reduce<T | undefined>((lead, each) => (lead === undefined || compareWeighed(each, lead) < 0 ? each : lead), undefined);
+  return all.reduce<T | undefined>(
+    (lead, each) => (lead === undefined || compareWeighed(each, lead) < 0 ? each : lead),
+    undefined,
+  );
 }

@@ -15,4 +15,3 @@ export function octaveLevels(thirds: readonly number[]): number[] {
 export function octaveLoss(thirds: readonly number[]): number[] {
   return inThrees(thirds, (three) => -levelOf(three.reduce((sum, loss) => sum + energyOf(-loss), 0) / 3));
 }
-

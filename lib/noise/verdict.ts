@@ -13,11 +13,13 @@ export type OutSpectrum = Out[];
 /** The one exit from arithmetic: what is not finite becomes a word. +Infinity is a loss or margin without sound. */
 export function toOut(value: number): Out {
   if (Number.isNaN(value)) return "unknown";
-  return Number.isFinite(value) ? value : "silent";
+  return Number.isFinite(value) ? value + 0 : "silent"; // -0 would not survive JSON
 }
 
 export function toOutSpectrum(values: ArrayLike<number>): OutSpectrum {
-  return Array.from(values, toOut);
+  const spectrum: OutSpectrum = [];
+  for (let band = 0; band < values.length; band += 1) spectrum.push(toOut(values[band]));
+  return spectrum;
 }
 
 /** Room left, dB: positive is good. */

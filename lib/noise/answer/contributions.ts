@@ -1,12 +1,13 @@
 import { BAND_COUNT } from "../bands";
 import { addEnergy, levelOf, noEnergy } from "../levels";
+import type { ElementModel } from "../model/elementModels";
 import { hasBand, type BandMask } from "../model/masks";
 import type { SourceModel } from "../model/sourceModels";
 import { mayArrive } from "../sound/emitters";
 import type { Field } from "../sound/field";
 import type { Entry } from "../sound/hearing";
 import type { SpreadFrom } from "../sound/unknowns";
-import { toOutSpectrum, type Contribution, type OutSpectrum } from "../verdict";
+import { toOut, toOutSpectrum, type Contribution, type OutSpectrum } from "../verdict";
 import type { Weighing } from "./weighing";
 
 /** One way of one source to a listener, as energy. */
@@ -33,24 +34,32 @@ function tainted(spread: SpreadFrom | null, from: number, to: number): BandMask 
 
 /** Bands in which the sound of a source inside a room is not known. */
 function unknownInside({ spread }: Reckoning, source: SourceModel, room: number): BandMask {
-  return source.injections.reduce((mask, { unknown, room: from }) => mask | unknown | tainted(spread, from, room), 0);
+  return source.injections.reduce(
+    (mask, { unknown, room: from }) => mask | unknown | tainted(spread, from, room),
+    0,
+  );
 }
 
 function ownShares({ weighing: { hearing, playing } }: Reckoning, source: SourceModel): Share[] {
   const weight = playing.weights[source.index];
   const own = hearing.own.subarray(source.index * BAND_COUNT, (source.index + 1) * BAND_COUNT);
-  return source.injections.filter(({ room }) => room === hearing.room).map(({ energy, unknown, outlet }) => ({
-    source,
-    path: outlet ? outlet.id : "in-room",
-    leavingId: outlet ? outlet.id : null,
-    enteringId: null,
-    energy: energy.map((power, band) => weight * power * own[band]),
-    unknown,
-  }));
+  return source.injections
+    .filter(({ room }) => room === hearing.room)
+    .map(({ energy, unknown, outlet }) => ({
+      source,
+      path: outlet ? outlet.id : "in-room",
+      leavingId: outlet ? outlet.id : null,
+      enteringId: null,
+      energy: energy.map((power, band) => weight * power * own[band]),
+      unknown,
+    }));
 }
 
 function passageShares(reckoning: Reckoning, source: SourceModel): Share[] {
-  const { field, weighing: { hearing, playing } } = reckoning;
+  const {
+    field,
+    weighing: { hearing, playing },
+  } = reckoning;
   const weight = playing.weights[source.index];
   return hearing.passages.map(({ element, from, gain }) => {
     const start = (source.index * field.rooms.length + from) * BAND_COUNT;
@@ -70,32 +79,55 @@ function incidentShares({ weighing: { hearing, playing }, spread }: Reckoning, s
     const entry = hearing.entries.find(({ element }) => element.index === at);
     if (!entry) return [];
     const { element, gain } = entry;
-    return [{
-      source,
-      path: element.element.id,
-      leavingId: null,
-      enteringId: element.element.id,
-      energy: energy.map((each, band) => playing.weights[source.index] * each * gain[band]),
-      unknown: unknown | element.unknown | tainted(spread, element.from, hearing.room),
-    }];
+    return [
+      {
+        source,
+        path: element.element.id,
+        leavingId: null,
+        enteringId: element.element.id,
+        energy: energy.map((each, band) => playing.weights[source.index] * each * gain[band]),
+        unknown: unknown | element.unknown | tainted(spread, element.from, hearing.room),
+      },
+    ];
   });
 }
 
-/** Whether a source sounds from an emitter at all. */
+/** Whether a source stands in the rooms that an element belongs to. */
+function standsBehind({ balance: { groups } }: Field, source: SourceModel, element: ElementModel): boolean {
+  return source.injections.some(({ room }) => groups[room] === groups[element.from]);
+}
+
+/** Whether a source sounds from an emitter at all: from inside, or because it entered there from outdoors. */
 function sounds(field: Field, source: SourceModel, emitter: number): boolean {
   const { element, source: only } = field.emitters[emitter];
   if (!element) return only === source.index;
-  return source.injections.some(({ room }) => field.balance.groups[room] === field.balance.groups[element.from]);
+  return source.emissions.length + source.incidents.length > 0 || standsBehind(field, source, element);
+}
+
+const unknownPower = (powers: readonly { unknown: BandMask }[]): BandMask =>
+  powers.reduce((mask, { unknown }) => mask | unknown, 0);
+
+/** Bands in which what a source sends out by an element is not known; what comes in from outdoors counts with its known parts. */
+function unknownLeaving(reckoning: Reckoning, source: SourceModel, element: ElementModel): BandMask {
+  const inside = standsBehind(reckoning.field, source, element)
+    ? element.unknown | unknownInside(reckoning, source, element.from)
+    : 0;
+  return inside | unknownPower(source.emissions) | unknownPower(source.incidents);
 }
 
 function bundlesOf(reckoning: Reckoning, source: SourceModel): Bundle[] {
-  const { field, weighing: { hearing, playing } } = reckoning;
+  const {
+    field,
+    weighing: { hearing, playing },
+  } = reckoning;
   const weight = playing.weights[source.index];
   return field.emitters.flatMap(({ element }, m) => {
     if (!sounds(field, source, m)) return [];
     const start = (m * field.sources.length + source.index) * BAND_COUNT;
-    const energy = noEnergy().map((_, band) => weight * field.emitted[start + band] * hearing.outdoors[m * BAND_COUNT + band]);
-    const unknown = element ? element.unknown | unknownInside(reckoning, source, element.from) : source.emissions.reduce((mask, each) => mask | each.unknown, 0);
+    const energy = field.emitted.slice(start, start + BAND_COUNT);
+    for (let band = 0; band < BAND_COUNT; band += 1)
+      energy[band] *= weight * hearing.outdoors[m * BAND_COUNT + band];
+    const unknown = element ? unknownLeaving(reckoning, source, element) : unknownPower(source.emissions);
     return [{ source, emitter: m, energy, unknown }];
   });
 }
@@ -143,11 +175,14 @@ function heardOf({ injections, emissions, incidents }: SourceModel): BandMask {
 }
 
 function toContribution({ source, path, leavingId, enteringId, energy, unknown }: Share): Contribution {
-  const levels = toOutSpectrum(energy.map((each, band) => (hasBand(unknown, band) ? NaN : levelOf(each))));
+  const levels: OutSpectrum = [];
+  for (let band = 0; band < BAND_COUNT; band += 1)
+    levels.push(toOut(hasBand(unknown, band) ? NaN : levelOf(energy[band])));
   return { sourceId: source.source.id, path, leavingId, enteringId, levels };
 }
 
-const matters = ({ energy, unknown }: Share | Bundle): boolean => unknown !== 0 || energy.some((each) => each > 0);
+const matters = ({ energy, unknown }: Share | Bundle): boolean =>
+  unknown !== 0 || energy.some((each) => each > 0);
 
 export interface Contributions {
   readonly contributions: Contribution[];
@@ -163,11 +198,21 @@ export function contributionsOf(reckoning: Reckoning, most: number): Contributio
   const factors = allowances(weighing);
   const playing = field.sources.filter(({ index }) => weighing.playing.weights[index] > 0);
   const masks = new Map(playing.map((source) => [source, heardOf(source) & weighing.unknown]));
-  const masked = <T extends Share | Bundle>(share: T): T => ({ ...share, unknown: share.unknown & (masks.get(share.source) ?? 0) });
-  const shares = playing.flatMap((source) => [
-    ...ownShares(reckoning, source), ...passageShares(reckoning, source), ...incidentShares(reckoning, source),
-  ]).map(masked);
-  const bundles = playing.flatMap((source) => bundlesOf(reckoning, source)).map(masked).filter(matters);
+  const masked = <T extends Share | Bundle>(share: T): T => ({
+    ...share,
+    unknown: share.unknown & (masks.get(share.source) ?? 0),
+  });
+  const shares = playing
+    .flatMap((source) => [
+      ...ownShares(reckoning, source),
+      ...passageShares(reckoning, source),
+      ...incidentShares(reckoning, source),
+    ])
+    .map(masked);
+  const bundles = playing
+    .flatMap((source) => bundlesOf(reckoning, source))
+    .map(masked)
+    .filter(matters);
   bundles.sort((a, b) => rank(b.energy, factors) - rank(a.energy, factors));
   const rest = noEnergy();
   let closed = 0;

@@ -2,7 +2,7 @@ import { BAND_COUNT } from "../bands";
 import { addEnergy, levelOf } from "../levels";
 import { hasBand, maskWhere, NO_BANDS, type BandMask } from "../model/masks";
 import type { Part } from "../sound/parts";
-import { toOut, toOutSpectrum, type PathVerdict } from "../verdict";
+import { toOut, type PathVerdict } from "../verdict";
 import type { Weighing } from "./weighing";
 
 /** Ways that a reader sees as one: an element, a source, a mouth, or all leaks of a building. */
@@ -23,20 +23,25 @@ export function waysOf(weighing: Weighing): Way[] {
   const groups = new Map<string, Part[]>();
   for (const part of weighing.parts.ways) {
     const id = groupIdOf(part);
-    groups.set(id, [...(groups.get(id) ?? []), part]);
+    const known = groups.get(id);
+    if (known) known.push(part);
+    else groups.set(id, [part]);
   }
   const ways = [...groups].map(([id, parts]): Way => {
     const energy = new Float64Array(BAND_COUNT);
     parts.forEach((part) => addEnergy(energy, part.energy));
     return { id, parts, energy };
   });
-  return ways.filter((way) => unknownOf(weighing, way) !== NO_BANDS || way.energy.some((each) => each > 0)).sort(
-    (a, b) => rankOf(weighing, b.energy) - rankOf(weighing, a.energy),
-  );
+  return ways
+    .filter((way) => unknownOf(weighing, way) !== NO_BANDS || way.energy.some((each) => each > 0))
+    .sort((a, b) => rankOf(weighing, b.energy) - rankOf(weighing, a.energy));
 }
 
 /** What of an energy counts where the listener is weighed: the leading band, or the weighted total. */
-export function rankOf({ total, leading }: Pick<Weighing, "total" | "leading">, energy: Float64Array): number {
+export function rankOf(
+  { total, leading }: Pick<Weighing, "total" | "leading">,
+  energy: Float64Array,
+): number {
   if (total) return weightedSum(energy, total.factors);
   return leading < 0 ? 0 : energy[leading];
 }
@@ -49,12 +54,16 @@ function weightedSum(energy: Float64Array, factors: Float64Array): number {
 
 /** Bands in which a way's own figure is not known. */
 function unknownOf({ unknown }: Weighing, { parts, energy }: Way): BandMask {
+  if (unknown === NO_BANDS) return NO_BANDS;
   const own = parts.reduce((mask, { element }) => mask | (element?.unknown ?? 0), 0);
   return unknown & (own | maskWhere((band) => energy[band] === 0));
 }
 
 function estimatedOf({ parts }: Way): BandMask {
-  return parts.reduce((mask, { element, source }) => mask | (element?.estimated ?? 0) | (source?.estimated ? ~0 : 0), 0);
+  return parts.reduce(
+    (mask, { element, source }) => mask | (element?.estimated ?? 0) | (source?.estimated ? ~0 : 0),
+    0,
+  );
 }
 
 /** What is left of `whole` without `part`; what only rounding leaves is silence. */
@@ -72,20 +81,38 @@ function weightedPath({ total, energy }: Weighing, way: Way): PathVerdict["weigh
   return { level: toOut(levelOf(part)), share: shareOf(part, whole), without: toOut(without) };
 }
 
+/** Four rows of nine bands: level, share and level without, and whether estimates stand behind them. */
+function bandsOf(
+  { energy, unknown }: Weighing,
+  way: Way,
+  ownUnknown: BandMask,
+): Pick<PathVerdict, "levels" | "shares" | "without" | "estimated"> {
+  const rows: Pick<PathVerdict, "levels" | "shares" | "without" | "estimated"> = {
+    levels: [],
+    shares: [],
+    without: [],
+    estimated: [],
+  };
+  const estimates = estimatedOf(way);
+  for (let band = 0; band < BAND_COUNT; band += 1) {
+    const [part, whole] = [way.energy[band], energy[band]];
+    rows.levels.push(toOut(hasBand(ownUnknown, band) ? NaN : levelOf(part)));
+    rows.shares.push(shareOf(part, whole));
+    rows.without.push(toOut(hasBand(unknown, band) ? NaN : levelOf(remainder(whole, part))));
+    rows.estimated.push(hasBand(estimates, band));
+  }
+  return rows;
+}
+
 export function pathVerdict(weighing: Weighing, way: Way): PathVerdict {
-  const { energy, unknown } = weighing;
   const [first] = way.parts;
   const isGroup = way.id !== first.id;
-  const ownUnknown = unknownOf(weighing, way);
   return {
     id: way.id,
     kind: first.kind,
     partId: isGroup ? null : first.kind === "in the room" ? (first.source?.source.id ?? null) : first.id,
     name: isGroup ? "Leaks" : first.name,
-    levels: toOutSpectrum(way.energy.map((each, band) => (hasBand(ownUnknown, band) ? NaN : levelOf(each)))),
-    shares: Array.from(way.energy, (each, band) => shareOf(each, energy[band])),
-    without: toOutSpectrum(way.energy.map((each, band) => (hasBand(unknown, band) ? NaN : levelOf(remainder(energy[band], each))))),
+    ...bandsOf(weighing, way, unknownOf(weighing, way)),
     weighted: weightedPath(weighing, way),
-    estimated: Array.from(way.energy, (_, band) => hasBand(estimatedOf(way), band)),
   };
 }

@@ -24,7 +24,12 @@ function ncVerdict(levels: Float64Array, edition: string | undefined): ReceiverV
 }
 
 /** Everything the product says of one listener, of the weighing that leads. */
-export function receiverVerdict(field: Field, weighing: Weighing, spread: SpreadFrom | null, most: number): ReceiverVerdict {
+export function receiverVerdict(
+  field: Field,
+  weighing: Weighing,
+  spread: SpreadFrom | null,
+  most: number,
+): ReceiverVerdict {
   const { criterion, playing, hearing, energy, unknown, state, margin, leading, doubt, parts } = weighing;
   const levels = energy.map((each, band) => (hasBand(unknown, band) ? NaN : levelOf(each)));
   const ways = waysOf(weighing);

@@ -16,7 +16,12 @@ function estimatedBands({ bands, total, energy, metric }: Weighing, part: Part):
   return OCTAVE_BANDS.filter((_, band) => {
     if (metric === "none" || !isEstimated(part, band)) return false;
     if (total) return part.energy[band] * total.factors[band] >= MATTERS * whole && whole > 0;
-    return band >= FIRST_JUDGED && !Number.isNaN(bands[band].limit) && energy[band] > 0 && part.energy[band] >= MATTERS * energy[band];
+    return (
+      band >= FIRST_JUDGED &&
+      !Number.isNaN(bands[band].limit) &&
+      energy[band] > 0 &&
+      part.energy[band] >= MATTERS * energy[band]
+    );
   });
 }
 
@@ -29,7 +34,12 @@ export function restsOn(weighing: Weighing): ReceiverVerdict["restsOn"] {
     if (bands.length === 0) continue;
     const known = found.get(part.id)?.bands ?? [];
     const all = OCTAVE_BANDS.filter((band) => bands.includes(band) || known.includes(band));
-    found.set(part.id, { partId: part.id, name: part.name, what: part.what === "source" ? "source" : "element", bands: all });
+    found.set(part.id, {
+      partId: part.id,
+      name: part.name,
+      what: part.what === "source" ? "source" : "element",
+      bands: all,
+    });
   }
   return [...found.values()];
 }

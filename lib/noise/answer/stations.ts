@@ -27,11 +27,23 @@ export interface Walk {
 /** A metre in front of a thing. */
 const IN_FRONT = 1;
 
-function station({ section }: Walk, kind: Station["kind"], partId: string | null, at: Place, energy: Float64Array, unknown: BandMask): Station {
+function station(
+  { section }: Walk,
+  kind: Station["kind"],
+  partId: string | null,
+  at: Place,
+  energy: Float64Array,
+  unknown: BandMask,
+): Station {
   const levels = energy.map((each, band) => (hasBand(unknown, band) ? NaN : levelOf(each)));
   return {
-    kind, partId, along: alongOf(section, at), height: at[2],
-    levels: toOutSpectrum(levels), dba: toOut(aWeighted(levels)), dbc: toOut(cWeighted(levels)),
+    kind,
+    partId,
+    along: alongOf(section, at),
+    height: at[2],
+    levels: toOutSpectrum(levels),
+    dba: toOut(aWeighted(levels)),
+    dbc: toOut(cWeighted(levels)),
   };
 }
 
@@ -50,31 +62,43 @@ function energyOutdoors({ field: { emitters, yard }, weighing: { playing } }: Wa
   return energy;
 }
 
-function unknownOutdoors({ field, weighing: { playing }, spread }: Walk): BandMask {
+/** Bands in which an unknown part may reach a room, or the yard (-1). */
+function unknownIn({ field, weighing: { playing }, spread }: Walk, room: number): BandMask {
   if (!spread) return 0;
-  return field.sources.reduce((mask, source) => (playing.weights[source.index] > 0 ? mask | unknownAt(field, source, -1, spread) : mask), 0);
+  return field.sources.reduce(
+    (mask, source) =>
+      playing.weights[source.index] > 0 ? mask | unknownAt(field, source, room, spread) : mask,
+    0,
+  );
 }
-
-function unknownInRoom({ field, weighing: { playing }, spread }: Walk, room: number): BandMask {
-  if (!spread) return 0;
-  return field.sources.reduce((mask, source) => (playing.weights[source.index] > 0 ? mask | unknownAt(field, source, room, spread) : mask), 0);
-}
+const YARD = -1;
 
 /** A metre from a place towards another on plan. */
 function towards(from: Place, to: Place): Place {
   const [x, y] = [to[0] - from[0], to[1] - from[1]];
   const length = Math.hypot(x, y);
-  return length === 0 ? from : [from[0] + (IN_FRONT * x) / length, from[1] + (IN_FRONT * y) / length, from[2]];
+  return length === 0
+    ? from
+    : [from[0] + (IN_FRONT * x) / length, from[1] + (IN_FRONT * y) / length, from[2]];
 }
 
 /** 1 m from the loudest source: direct sound of it, and what stands in its room; outdoors the yard. */
 export function sourceStation(walk: Walk, { source, index, injections, q }: SourceModel, at: Place): Station {
-  const { field, weighing: { playing } } = walk;
+  const { playing } = walk.weighing;
   const [injection] = injections;
-  if (!injection) return station(walk, "source", source.id, at, energyOutdoors(walk, towards(at, walk.listener)), unknownOutdoors(walk));
+  if (!injection)
+    return station(
+      walk,
+      "source",
+      source.id,
+      at,
+      energyOutdoors(walk, towards(at, walk.listener)),
+      unknownIn(walk, YARD),
+    );
   const energy = playing.inside.slice(injection.room * BAND_COUNT, (injection.room + 1) * BAND_COUNT);
-  if (!injection.outlet) addEnergy(energy, injection.energy, playing.weights[index] * directFactor(q, IN_FRONT));
-  return station(walk, "source", source.id, at, energy, unknownInRoom(walk, injection.room));
+  if (!injection.outlet)
+    addEnergy(energy, injection.energy, playing.weights[index] * directFactor(q, IN_FRONT));
+  return station(walk, "source", source.id, at, energy, unknownIn(walk, injection.room));
 }
 
 function frontOf({ element, source }: Part, listener: Place): Place | null {
@@ -91,9 +115,13 @@ function frontOf({ element, source }: Part, listener: Place): Place | null {
 
 /** 1 m outside the element by which most leaves; null where nothing leaves. */
 export function leavingStation(walk: Walk, way: Way | undefined): Station | null {
-  const loudest = way?.parts.filter(({ what }) => what === "leaving").reduce<Part | null>((best, part) => (best && sum(best) >= sum(part) ? best : part), null);
+  const loudest = way?.parts
+    .filter(({ what }) => what === "leaving")
+    .reduce<Part | null>((best, part) => (best && sum(best) >= sum(part) ? best : part), null);
   const at = loudest && frontOf(loudest, walk.listener);
-  return loudest && at ? station(walk, "leaving", loudest.id, at, energyOutdoors(walk, at), unknownOutdoors(walk)) : null;
+  return loudest && at
+    ? station(walk, "leaving", loudest.id, at, energyOutdoors(walk, at), unknownIn(walk, YARD))
+    : null;
 }
 
 function sum({ energy }: Part): number {
@@ -101,21 +129,36 @@ function sum({ energy }: Part): number {
 }
 
 export function yardStation(walk: Walk, fenceId: string, at: Place): Station {
-  return station(walk, "fence", fenceId, at, energyOutdoors(walk, at), unknownOutdoors(walk));
+  return station(walk, "fence", fenceId, at, energyOutdoors(walk, at), unknownIn(walk, YARD));
 }
 
 /** Free-field level at the centre of the element by which most enters the listener's rooms. */
 export function windowStation(walk: Walk): Station | null {
-  const { field, weighing: { parts, playing, hearing } } = walk;
-  const entering = parts.entering.filter(({ element }) => element && field.pointOfElement.has(element.index) && hearing.room >= 0);
-  const loudest = entering.reduce<Part | null>((best, part) => (best && sum(best) >= sum(part) ? best : part), null);
+  const {
+    field,
+    weighing: { parts, playing, hearing },
+  } = walk;
+  const entering = parts.entering.filter(
+    ({ element }) => element && field.pointOfElement.has(element.index) && hearing.room >= 0,
+  );
+  const loudest = entering.reduce<Part | null>(
+    (best, part) => (best && sum(best) >= sum(part) ? best : part),
+    null,
+  );
   const point = loudest?.element ? field.pointOfElement.get(loudest.element.index) : undefined;
   if (!loudest || point === undefined || sum(loudest) === 0) return null;
   const energy = playing.arriving.subarray(point * BAND_COUNT, (point + 1) * BAND_COUNT);
-  return station(walk, "window", loudest.id, field.points[point].end.at, energy, unknownOutdoors(walk));
+  return station(walk, "window", loudest.id, field.points[point].end.at, energy, unknownIn(walk, YARD));
 }
 
 export function listenerStation(walk: Walk): Station {
   const { energy, unknown, hearing } = walk.weighing;
-  return station(walk, "listener", hearing.receiver.id, walk.listener, energy, hearing.placed ? unknown : ALL_BANDS);
+  return station(
+    walk,
+    "listener",
+    hearing.receiver.id,
+    walk.listener,
+    energy,
+    hearing.placed ? unknown : ALL_BANDS,
+  );
 }

@@ -48,7 +48,9 @@ export interface Weighing extends Weighed {
 
 function energyAt({ bySource }: Hearing, { weights }: Playing): Float64Array {
   const energy = new Float64Array(BAND_COUNT);
-  weights.forEach((weight, s) => energy.forEach((_, band) => (energy[band] += weight * bySource[s * BAND_COUNT + band])));
+  weights.forEach((weight, s) =>
+    energy.forEach((_, band) => (energy[band] += weight * bySource[s * BAND_COUNT + band])),
+  );
   return energy;
 }
 
@@ -62,19 +64,38 @@ function knownMargin(limit: number, known: number, unknown: boolean): number {
   return unknown && !(margin < 0) ? NaN : margin;
 }
 
-function weighBand(index: number, limit: number, energy: number, unknown: boolean, doubt: number): WeighedBand {
+function weighBand(
+  index: number,
+  limit: number,
+  energy: number,
+  unknown: boolean,
+  doubt: number,
+): WeighedBand {
   const known = levelOf(energy);
   const margin = Number.isNaN(limit) ? NaN : knownMargin(limit, known, unknown);
   return { index, limit, known, unknown, doubt, margin, state: stateOf(margin, doubt) };
 }
 
-function weighTotal({ metric, value }: Criterion, energy: Float64Array, unknown: BandMask, doubts: Float64Array): WeighedTotal | null {
+function weighTotal(
+  { metric, value }: Criterion,
+  energy: Float64Array,
+  unknown: BandMask,
+  doubts: Float64Array,
+): WeighedTotal | null {
   if ((metric !== "dBA" && metric !== "dBC") || value === null) return null;
   const factors = WEIGHT_FACTORS[metric === "dBA" ? "A" : "C"];
   const known = levelOf(energy.reduce((sum, each, band) => sum + factors[band] * each, 0));
   const margin = knownMargin(value, known, unknown !== 0);
   const doubt = weightedDoubt(doubts, energy, factors);
-  return { limit: value, known, unknown: unknown !== 0, doubt, factors, margin, state: stateOf(margin, doubt) };
+  return {
+    limit: value,
+    known,
+    unknown: unknown !== 0,
+    doubt,
+    factors,
+    margin,
+    state: stateOf(margin, doubt),
+  };
 }
 
 /** Band with most energy, weighted; -1 in silence. */
@@ -93,19 +114,40 @@ function metricOf(criterion: Criterion | null): ReceiverVerdict["metric"] {
 }
 
 /** Weighs a listener; state and figure are taken over 63 Hz to 8 kHz, or over the weighted total. */
-export function weigh(field: Field, hearing: Hearing, playing: Playing, criterion: Criterion | null): Weighing {
+export function weigh(
+  field: Field,
+  hearing: Hearing,
+  playing: Playing,
+  criterion: Criterion | null,
+): Weighing {
   const energy = energyAt(hearing, playing);
   const unknown = unknownIn(hearing, playing);
   const parts = partsOf(field, hearing, playing);
   const doubts = doubtsOf(parts, energy);
   const limits = criterion ? limitLevels(criterion) : new Float64Array(BAND_COUNT).fill(NaN);
-  const bands = Array.from(limits, (limit, i) => weighBand(i, limit, energy[i], hasBand(unknown, i), doubts[i]));
+  const bands = Array.from(limits, (limit, i) =>
+    weighBand(i, limit, energy[i], hasBand(unknown, i), doubts[i]),
+  );
   const total = criterion && weighTotal(criterion, energy, unknown, doubts);
   const lead = leadingOf(bands.filter(({ index, limit }) => index >= FIRST_JUDGED && !Number.isNaN(limit)));
   const leading = lead?.index ?? loudestBand(energy, total?.factors ?? WEIGHT_FACTORS.A);
   const { state, margin } = total ?? lead ?? { state: "not weighed" as const, margin: NaN };
   const doubt = total?.doubt ?? doubts[leading] ?? NaN;
-  return { criterion, playing, hearing, parts, energy, unknown, bands, total, leading, metric: metricOf(criterion), state, margin, doubt };
+  return {
+    criterion,
+    playing,
+    hearing,
+    parts,
+    energy,
+    unknown,
+    bands,
+    total,
+    leading,
+    metric: metricOf(criterion),
+    state,
+    margin,
+    doubt,
+  };
 }
 
 /** Share of the allowance that a band spends, 1 = the limit; of a weighted limit with its weighted energy. */
@@ -130,11 +172,22 @@ export function bandVerdicts(weighing: Weighing): BandVerdict[] {
 export function weightedVerdict({ total }: Weighing): ReceiverVerdict["weighted"] {
   if (!total) return null;
   const { known, unknown, limit, margin, doubt } = total;
-  return { level: toOut(unknown ? NaN : known), known: toOut(known), limit, margin: toOut(margin), spent: energyOf(known - limit), doubt };
+  return {
+    level: toOut(unknown ? NaN : known),
+    known: toOut(known),
+    limit,
+    margin: toOut(margin),
+    spent: energyOf(known - limit),
+    doubt,
+  };
 }
 
 /** 31.5 Hz has its own mark: shown, never judged. */
 export function lowestVerdict({ bands: [lowest], total }: Weighing): ReceiverVerdict["lowest"] {
   if (total || Number.isNaN(lowest.limit)) return null;
-  return { state: lowest.state, margin: Number.isFinite(lowest.margin) ? lowest.margin : null, doubt: lowest.doubt };
+  return {
+    state: lowest.state,
+    margin: Number.isFinite(lowest.margin) ? lowest.margin : null,
+    doubt: lowest.doubt,
+  };
 }

@@ -1,5 +1,6 @@
 import { BAND_COUNT, FIRST_JUDGED, OCTAVE_BANDS, THIRD_BANDS, type Band } from "../bands";
 import { ncOf, nrOf, type Rating } from "../criteria";
+import { sumLevels } from "../levels";
 import { toArithmetic, type Spectrum } from "../spectrum";
 import { transmissionCached, type Description } from "../transmission";
 import { toOut, type BandVerdict, type Out, type ReceiverVerdict } from "../verdict";
@@ -23,20 +24,46 @@ function ratingWords({ value, band }: Rating): [Out | "above", Band | null] {
 /** An excess counts even with unknown bands elsewhere; otherwise one unknown band leaves the least margin unknown. */
 function leastMargin(bands: readonly BandVerdict[]): { min_margin: Out; deciding_band: Band | null } {
   const judged = bands.slice(FIRST_JUDGED).filter(({ limit }) => limit !== null);
-  const numbers = judged.flatMap(({ margin, band }) => (typeof margin === "number" ? [{ margin, band }] : []));
-  const least = numbers.reduce<(typeof numbers)[number] | null>((low, each) => (low === null || each.margin < low.margin ? each : low), null);
-  if (judged.some(({ margin }) => margin === "unknown") && !(least && least.margin < 0)) return { min_margin: "unknown", deciding_band: null };
-  return least ? { min_margin: least.margin, deciding_band: least.band } : { min_margin: "silent", deciding_band: null };
+  const numbers = judged.flatMap(({ margin, band }) =>
+    typeof margin === "number" ? [{ margin, band }] : [],
+  );
+  const least = numbers.reduce<(typeof numbers)[number] | null>(
+    (low, each) => (low === null || each.margin < low.margin ? each : low),
+    null,
+  );
+  if (judged.some(({ margin }) => margin === "unknown") && !(least && least.margin < 0))
+    return { min_margin: "unknown", deciding_band: null };
+  return least
+    ? { min_margin: least.margin, deciding_band: least.band }
+    : { min_margin: "silent", deciding_band: null };
 }
 
+/** A band on which a curve says nothing has no limit to weigh against: unknown there, and no part of the least margin. */
 function limitAnswer({ metric, bands, weighted, criterionId }: ReceiverVerdict, length: number): Answer {
   if (criterionId === null) return {};
   if (weighted) return { [metric === "dBA" ? "margin_dba" : "margin_dbc"]: weighted.margin };
   return {
-    criterion: cut(bands, length).map(({ limit }) => limit),
-    margin: cut(bands, length).map(({ margin }) => margin),
+    criterion: cut(bands, length).map(({ limit }) => limit ?? "unknown"),
+    margin: cut(bands, length).map(({ margin }) => margin ?? "unknown"),
     ...leastMargin(bands),
   };
+}
+
+/** Levels by source and path; ways that bear the same name are summed, so that all still add up to the level. */
+function contributionAnswer(
+  contributions: ReceiverVerdict["contributions"],
+  length: number,
+): Record<string, Out[]> {
+  const named = new Map<string, Float64Array>();
+  for (const { sourceId, path, levels } of contributions) {
+    const key = `${sourceId} | ${path}`;
+    const before = named.get(key);
+    const each = fromOut(levels);
+    named.set(key, before ? before.map((level, band) => sumLevels([level, each[band]])) : each);
+  }
+  return Object.fromEntries(
+    Array.from(named, ([key, levels]) => [key, cut(Array.from(levels, toOut), length)]),
+  );
 }
 
 export function answerReceiver(verdict: ReceiverVerdict, length: number): Answer {
@@ -44,7 +71,7 @@ export function answerReceiver(verdict: ReceiverVerdict, length: number): Answer
   const levels = bands.map(({ level }) => level);
   return {
     levels: cut(levels, length),
-    contributions: Object.fromEntries(contributions.map(({ sourceId, path, levels: each }) => [`${sourceId} | ${path}`, cut(each, length)])),
+    contributions: contributionAnswer(contributions, length),
     dba,
     dbc,
     nc: ratingWords(ncOf(fromOut(levels))),
@@ -57,7 +84,12 @@ export function answerReceiver(verdict: ReceiverVerdict, length: number): Answer
 
 export function answerSpectrum(spectrum: Spectrum): Answer {
   const levels = toArithmetic(spectrum);
-  return { dba: toOut(aWeighted(levels)), dbc: toOut(cWeighted(levels)), nc: ratingWords(ncOf(levels)), nr: ratingWords(nrOf(levels)) };
+  return {
+    dba: toOut(aWeighted(levels)),
+    dbc: toOut(cWeighted(levels)),
+    nc: ratingWords(ncOf(levels)),
+    nr: ratingWords(nrOf(levels)),
+  };
 }
 
 const FIRST_PRINTED = THIRD_BANDS.indexOf(50);

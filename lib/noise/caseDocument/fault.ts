@@ -20,7 +20,11 @@ export function pathWords(path: readonly Key[]): string {
 }
 
 /** The value of a schema, or the first fault of it. */
-export function readWith<T extends z.ZodType>(schema: T, value: unknown, at: readonly Key[] = []): z.output<T> {
+export function readWith<T extends z.ZodType>(
+  schema: T,
+  value: unknown,
+  at: readonly Key[] = [],
+): z.output<T> {
   const reading = schema.safeParse(value);
   if (reading.success) return reading.data;
   const [issue] = reading.error.issues;

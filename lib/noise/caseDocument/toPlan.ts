@@ -4,77 +4,80 @@ import type { PathElement } from "../elements";
 import { planSchema, type Plan, type Space, type Surface } from "../plan";
 import { areaFromDecay } from "../rooms";
 import type { Basis } from "../spectrum";
-import { readWith } from "./fault";
+import { CaseFault, readWith } from "./fault";
 import type { Budget, CaseConstruction } from "./schema";
+import { PROVENANCE, situationsOf, sourcesOf } from "./sourcesOf";
 
-const PROVENANCE = { document: "the document itself", clause: "", memory: false };
 const LABORATORY: Basis[] = Array.from({ length: BAND_COUNT }, () => "laboratory");
 const MEASURED: Basis[] = Array.from({ length: BAND_COUNT }, () => "measured");
 
 function constructionOf(id: string, name: string, given: CaseConstruction): Construction {
-  const shared = { id, name: name.trim().slice(0, 120) || id, fits: [], catalogueKey: null, layers: [], size: null, use: null, provenance: PROVENANCE };
+  const shared = {
+    id,
+    name: name.trim().slice(0, 120) || id,
+    fits: [],
+    catalogueKey: null,
+    layers: [],
+    size: null,
+    use: null,
+    provenance: PROVENANCE,
+  };
   if ("tl" in given) return { ...shared, tl: given.tl, bases: LABORATORY, description: null };
   return { ...shared, tl: null, bases: null, description: given };
 }
 
 function absorptionOf({ absorption, volume, air: roomAir }: Budget["rooms"][number]): Space["absorption"] {
   const air = absorption.air || roomAir;
-  if ("surfaces" in absorption) return { kind: "surfaces", model: absorption.model, air, objects: absorption.objects };
-  if (!air) return "area" in absorption ? { kind: "area", area: absorption.area } : { kind: "decay", seconds: absorption.rt };
-  const area = "area" in absorption ? absorption.area : absorption.rt.map((seconds) => (seconds === null ? null : areaFromDecay(volume, seconds)));
+  if ("surfaces" in absorption)
+    return { kind: "surfaces", model: absorption.model, air, objects: absorption.objects };
+  if (!air)
+    return "area" in absorption
+      ? { kind: "area", area: absorption.area }
+      : { kind: "decay", seconds: absorption.rt };
+  const area =
+    "area" in absorption
+      ? absorption.area
+      : absorption.rt.map((seconds) => (seconds === null ? null : areaFromDecay(volume, seconds)));
   return { kind: "surfaces", model: "sabine", air, objects: [{ name: "room", area }] };
 }
 
 function surfacesOf({ id, absorption }: Budget["rooms"][number], r: number): Surface[] {
   if (!("surfaces" in absorption)) return [];
   return absorption.surfaces.map(({ name, area, alpha }, i) => ({
-    id: `surface-${r}-${i}`, spaceId: id, name: name?.trim() || `surface ${i + 1}`, area, finishKey: null, alpha, bases: MEASURED, provenance: PROVENANCE,
+    id: `surface-${r}-${i}`,
+    spaceId: id,
+    name: name?.trim() || `surface ${i + 1}`,
+    area,
+    finishKey: null,
+    alpha,
+    bases: MEASURED,
+    provenance: PROVENANCE,
   }));
 }
 
 function elementOf(given: Budget["elements"][number], i: number, constructionId: string | null): PathElement {
   const placed = {
-    id: given.id, pathId: `path-${i}`, name: given.id, area: given.area ?? given.opening ?? 1, constructionId, limit: given.limit ?? null,
-    position: given.position ?? null, normal: given.normal ?? null, size: given.size ?? null,
-    directivity: given.directivity ?? null, diffuseness: given.diffuseness ?? null,
+    id: given.id,
+    pathId: `path-${i}`,
+    name: given.id,
+    area: given.area ?? given.opening ?? 1,
+    constructionId,
+    limit: given.limit ?? null,
+    position: given.position ?? null,
+    normal: given.normal ?? null,
+    size: given.size ?? null,
+    directivity: given.directivity ?? null,
+    diffuseness: given.diffuseness ?? null,
   };
-  if (given.kind === "duct") return { ...placed, kind: "duct", params: { opening: given.opening ?? placed.area, run: given.run ?? [] } };
+  if (given.kind === "duct")
+    return {
+      ...placed,
+      kind: "duct",
+      params: { opening: given.opening ?? placed.area, run: given.run ?? [] },
+    };
   if (given.kind === "door") return { ...placed, kind: "door", params: { gapArea: 0 } };
   if (given.kind === "window") return { ...placed, kind: "window", params: { openArea: 0 } };
   return { ...placed, kind: given.kind, params: {} };
-}
-
-type SourcePlan = Pick<Plan, "sources" | "outlets" | "incidences">;
-
-function addSource(plan: SourcePlan, source: Budget["sources"][number], s: number): void {
-  const shared = { id: source.id, name: source.id, says: "", spaceId: null, position: null, power: null, deviation: null, basis: "typed" as const, provenance: PROVENANCE };
-  if (source.kind === "room") plan.sources.push({ ...shared, kind: "instrument", spaceId: source.room, power: source.lw, params: { q: source.q } });
-  if (source.kind === "outdoor") {
-    plan.sources.push({ ...shared, kind: "condenser", position: source.position, power: source.lw, params: { directivity: source.directivity } });
-  }
-  if (source.kind === "fan") {
-    plan.sources.push({ ...shared, kind: "fan", power: source.lw, params: {} });
-    source.outlets.forEach(({ id, room, position, directivity, run }) =>
-      plan.outlets.push({ id, sourceId: source.id, name: id, spaceId: room ?? null, position: position ?? null, directivity, run: [...source.run, ...run] }),
-    );
-  }
-  if (source.kind === "incident") {
-    plan.sources.push({ ...shared, kind: "traffic", params: {} });
-    Object.entries(source.at).forEach(([elementId, levels], i) => plan.incidences.push({ id: `incidence-${s}-${i}`, sourceId: source.id, elementId, levels }));
-  }
-}
-
-function sourcePlan({ sources }: Budget): SourcePlan {
-  const plan: SourcePlan = { sources: [], outlets: [], incidences: [] };
-  sources.forEach((source, s) => addSource(plan, source, s));
-  return plan;
-}
-
-/** Shares of the time stand in one situation; where no source has one, everything runs. */
-function situationsOf({ sources }: Budget): Plan["situations"] {
-  if (sources.every(({ share }) => share === undefined)) return [];
-  const playing = sources.filter(({ share }) => share !== 0).map(({ id, share }) => ({ sourceId: id, share: share ?? 1 }));
-  return [{ id: "situation", name: "as given", says: "", playing }];
 }
 
 function criteriaOf({ receivers }: Budget): Plan["criteria"] {
@@ -83,26 +86,58 @@ function criteriaOf({ receivers }: Budget): Plan["criteria"] {
     const levels = criterion.kind === "curve" ? criterion.levels : null;
     const value = criterion.kind === "curve" ? null : criterion.value;
     const edition = criterion.kind === "NC" ? (criterion.edition ?? "") : "";
-    return [{
-      id: `criterion-${i}`, receiverId: id, name: criterion.kind, metric: criterion.kind, value, levels, edition,
-      averaging: criterion.averaging, hours: null, place: "", provenance: PROVENANCE,
-    }];
+    return [
+      {
+        id: `criterion-${i}`,
+        receiverId: id,
+        name: criterion.kind,
+        metric: criterion.kind,
+        value,
+        levels,
+        edition,
+        averaging: criterion.averaging,
+        hours: null,
+        place: "",
+        provenance: PROVENANCE,
+      },
+    ];
   });
 }
 
 function constructionsOf({ constructions, elements }: Budget) {
-  const named = new Map(Object.entries(constructions).map(([name, given], i) => [name, constructionOf(`named-${i}`, name, given)]));
+  const named = new Map(
+    Object.entries(constructions).map(([name, given], i) => [
+      name,
+      constructionOf(`named-${i}`, name, given),
+    ]),
+  );
   const all = [...named.values()];
+  const own = new Map<string, string>();
   const idOf = elements.map(({ id, tl, construction, kind }, i) => {
     if (kind === "leak" || kind === "duct") return null;
     if (typeof construction === "string") return named.get(construction)?.id ?? null;
     const given = tl ? { tl } : construction;
     if (!given) return null;
+    const content = JSON.stringify(given);
+    const same = own.get(content);
+    if (same) return same;
+    own.set(content, `own-${i}`);
     all.push(constructionOf(`own-${i}`, id, given));
     return `own-${i}`;
   });
   return { all, idOf };
 }
+
+/** Lists of a plan by the list of the document that fills them, for the bounds of a plan. */
+const LISTS: Record<string, string> = {
+  spaces: "rooms",
+  surfaces: "rooms",
+  paths: "elements",
+  constructions: "elements",
+  outlets: "sources",
+  incidences: "sources",
+  criteria: "receivers",
+};
 
 /** The plan of a budget. Throws a `CaseFault` where the bounds of a plan are passed. */
 export function planOfBudget(budget: Budget): Plan {
@@ -110,22 +145,59 @@ export function planOfBudget(budget: Budget): Plan {
   const constructions = constructionsOf(budget);
   const plan: Plan = {
     lot: {
-      id: "lot", street: "", outline: null, ground: options.ground, temperature: options.temperature, humidity: options.humidity,
-      indoorTemperature: options.indoor_temperature, indoorHumidity: options.indoor_humidity, trees: [],
+      id: "lot",
+      street: "",
+      outline: null,
+      ground: options.ground,
+      temperature: options.temperature,
+      humidity: options.humidity,
+      indoorTemperature: options.indoor_temperature,
+      indoorHumidity: options.indoor_humidity,
+      trees: [],
     },
     buildings: [],
-    spaces: rooms.map((room) => ({ id: room.id, buildingId: room.building, name: room.id, volume: room.volume, box: null, absorption: absorptionOf(room) })),
+    spaces: rooms.map((room) => ({
+      id: room.id,
+      buildingId: room.building,
+      name: room.id,
+      volume: room.volume,
+      box: null,
+      absorption: absorptionOf(room),
+    })),
     surfaces: rooms.flatMap(surfacesOf),
-    ...sourcePlan(budget),
-    paths: elements.map(({ from, to, id }, i) => ({ id: `path-${i}`, fromSpaceId: from, toSpaceId: to === "outdoors" ? null : to, name: id })),
+    ...sourcesOf(budget),
+    paths: elements.map(({ from, to, id }, i) => ({
+      id: `path-${i}`,
+      fromSpaceId: from,
+      toSpaceId: to === "outdoors" ? null : to,
+      name: id,
+    })),
     constructions: constructions.all,
     elements: elements.map((each, i) => elementOf(each, i, constructions.idOf[i])),
-    fences: fences.map((fence, i) => ({ ...fence, id: fence.id ?? `fence-${i}`, name: fence.id ?? `fence ${i + 1}` })),
+    fences: fences.map((fence, i) => ({
+      ...fence,
+      id: fence.id ?? `fence-${i}`,
+      name: fence.id ?? `fence ${i + 1}`,
+    })),
     receivers: receivers.map(({ id, kind, room, position, facade, side, distances }) => ({
-      id, name: id, says: "", kind, spaceId: room ?? null, position: position ?? null, facade, side, distances,
+      id,
+      name: id,
+      says: "",
+      kind,
+      spaceId: room ?? null,
+      position: position ?? null,
+      facade,
+      side,
+      distances,
     })),
     criteria: criteriaOf(budget),
     situations: situationsOf(budget),
   };
-  return readWith(planSchema, plan);
+  try {
+    return readWith(planSchema, plan);
+  } catch (fault) {
+    if (fault instanceof CaseFault && fault.path in LISTS)
+      throw new CaseFault(fault.message, LISTS[fault.path]);
+    throw fault;
+  }
 }

@@ -7,6 +7,7 @@ const nameOf = (band: number): string => (band >= 1000 ? `${band / 1000} kHz` : 
 export function bandNames(mask: BandMask): string {
   if (mask === ALL_BANDS) return "in any band";
   const names = OCTAVE_BANDS.filter((_, band) => hasBand(mask, band)).map(nameOf);
-  const list = names.length < 2 ? names.join("") : `${names.slice(0, -1).join(", ")} and ${names[names.length - 1]}`;
+  const list =
+    names.length < 2 ? names.join("") : `${names.slice(0, -1).join(", ")} and ${names[names.length - 1]}`;
   return `at ${list}`;
 }

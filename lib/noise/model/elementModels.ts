@@ -46,14 +46,22 @@ function noteOf(partId: string, text: string): Note {
 }
 
 /** Rooms on both sides of a path as indices, -1 outdoors; null where the path leads nowhere. */
-function sidesOf(path: Path | undefined, rooms: ReadonlyMap<string, RoomModel>): { from: number; to: number } | null {
+function sidesOf(
+  path: Path | undefined,
+  rooms: ReadonlyMap<string, RoomModel>,
+): { from: number; to: number } | null {
   const from = path && rooms.get(path.fromSpaceId)?.index;
   const to = path && (path.toSpaceId === null ? -1 : rooms.get(path.toSpaceId)?.index);
   return from === undefined || to === undefined || from === to ? null : { from, to };
 }
 
 /** Elements of a plan with what they let pass. What stands nowhere or is made of nothing becomes a note. */
-export function elementModels(plan: Plan, losses: ReadonlyMap<string, EffectiveLoss>, rooms: readonly RoomModel[], notes: Note[]): Parts {
+export function elementModels(
+  plan: Plan,
+  losses: ReadonlyMap<string, EffectiveLoss>,
+  rooms: readonly RoomModel[],
+  notes: Note[],
+): Parts {
   const paths = new Map(plan.paths.map((path) => [path.id, path]));
   const roomsById = new Map(rooms.map((room) => [room.space.id, room]));
   const passings = new Map<string, ElementPassing>();
@@ -71,7 +79,10 @@ export function elementModels(plan: Plan, losses: ReadonlyMap<string, EffectiveL
     }
     const outdoors = sides.to < 0;
     const face = outdoors ? faceOf(element) : null;
-    if (outdoors && !face) notes.push(noteOf(element.id, `${element.name} has no place on the lot, so what leaves by it is not known.`));
+    if (outdoors && !face)
+      notes.push(
+        noteOf(element.id, `${element.name} has no place on the lot, so what leaves by it is not known.`),
+      );
     elements.push({
       ...passing,
       ...sides,

@@ -14,7 +14,8 @@ export function maskWhere(holds: (band: number) => boolean): BandMask {
 
 export const hasBand = (mask: BandMask, band: number): boolean => (mask & (1 << band)) !== 0;
 
-export const unknownBands = (values: ArrayLike<number>): BandMask => maskWhere((band) => Number.isNaN(values[band]));
+export const unknownBands = (values: ArrayLike<number>): BandMask =>
+  maskWhere((band) => Number.isNaN(values[band]));
 
 /** Energies of levels: zero for silence and for unknown bands, which `unknownBands` names. */
 export function knownEnergies(levels: Float64Array): Float64Array {

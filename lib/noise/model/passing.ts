@@ -53,18 +53,23 @@ export function passingOfElement(element: PathElement, of: EffectiveLoss | null)
   const unknown = unknownBands(loss);
   const closed = loss.map((decibels) => (Number.isNaN(decibels) ? Infinity : decibels));
   const limit = limitPassing(element);
-  const shut = closed.map((decibels) => (decibels === Infinity ? 0 : element.area * energyOf(-decibels)) + limit);
+  const shut = closed.map(
+    (decibels) => (decibels === Infinity ? 0 : element.area * energyOf(-decibels)) + limit,
+  );
   const passing = kindPassing(element, closed).map((area) => area + limit);
   const opening = (band: number) => (passing[band] > 0 ? (passing[band] - shut[band]) / passing[band] : 0);
   const basisOf = (band: number): Basis => of?.bases[band] ?? "estimated";
-  const bases = Array.from(passing, (_, band): Basis => (opening(band) > 1 - MATTERS ? "measured" : basisOf(band)));
+  const bases = Array.from(passing, (_, band): Basis =>
+    opening(band) > 1 - MATTERS ? "measured" : basisOf(band),
+  );
   return {
     passing,
     unknown,
     open: maskWhere((band) => passing[band] > 0) | unknown,
     bases,
     deviations: passing.map(
-      (_, band) => (1 - opening(band)) * elementDeviation(basisOf(band), band) + opening(band) * OPENING_DEVIATION,
+      (_, band) =>
+        (1 - opening(band)) * elementDeviation(basisOf(band), band) + opening(band) * OPENING_DEVIATION,
     ),
     estimated: maskWhere((band) => bases[band] === "estimated"),
   };

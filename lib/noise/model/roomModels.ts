@@ -16,7 +16,8 @@ export function roomModels({ spaces, surfaces, lot }: Plan, notes: Note[]): Room
     const absorption = absorptionOf(space, surfaces, lot);
     const unknown = unknownBands(absorption);
     const extent = unknown === ALL_BANDS ? "in any band" : "in every band";
-    if (unknown) notes.push({ partId: space.id, text: `How much ${space.name} absorbs is not known ${extent}.` });
+    if (unknown)
+      notes.push({ partId: space.id, text: `How much ${space.name} absorbs is not known ${extent}.` });
     return { index, space, absorption, unknown };
   });
 }

@@ -48,11 +48,19 @@ export interface SourceModel {
 
 function powerOf(levels: Float64Array): Power {
   const unknown = unknownBands(levels);
-  return { energy: knownEnergies(levels), unknown, heard: maskWhere((band) => levels[band] > -Infinity) | unknown };
+  return {
+    energy: knownEnergies(levels),
+    unknown,
+    heard: maskWhere((band) => levels[band] > -Infinity) | unknown,
+  };
 }
 
 type Placed = Pick<SourceModel, "injections" | "emissions" | "incidents" | "lost">;
-type Around = { rooms: ReadonlyMap<string, RoomModel>; elements: ReadonlyMap<string, ElementModel>; plan: Plan };
+type Around = {
+  rooms: ReadonlyMap<string, RoomModel>;
+  elements: ReadonlyMap<string, ElementModel>;
+  plan: Plan;
+};
 const NOWHERE: Placed = { injections: [], emissions: [], incidents: [], lost: 0 };
 
 function placeInRoom(source: Source, power: Power, { rooms }: Around): Placed {
@@ -63,7 +71,10 @@ function placeInRoom(source: Source, power: Power, { rooms }: Around): Placed {
 
 function placeOutdoors(source: Source, power: Power): Placed {
   const directivity = "directivity" in source.params ? source.params.directivity : 0;
-  return { ...NOWHERE, emissions: [{ ...power, at: source.position, directivity: energyOf(directivity), outlet: null }] };
+  return {
+    ...NOWHERE,
+    emissions: [{ ...power, at: source.position, directivity: energyOf(directivity), outlet: null }],
+  };
 }
 
 function throughRun(levels: Float64Array, { run }: Outlet): Power {
@@ -78,7 +89,13 @@ function placeFan(source: Source, levels: Float64Array, { plan, rooms }: Around)
     const power = throughRun(levels, outlet);
     const room = outlet.spaceId === null ? undefined : rooms.get(outlet.spaceId);
     if (room) placed.injections.push({ ...power, room: room.index, outlet });
-    else placed.emissions.push({ ...power, at: outlet.spaceId === null ? outlet.position : null, directivity: energyOf(outlet.directivity), outlet });
+    else
+      placed.emissions.push({
+        ...power,
+        at: outlet.spaceId === null ? outlet.position : null,
+        directivity: energyOf(outlet.directivity),
+        outlet,
+      });
   }
   return { ...NOWHERE, ...placed, lost: outlets.length === 0 ? powerOf(levels).heard : 0 };
 }
@@ -104,13 +121,22 @@ function placeSource(source: Source, around: Around): Placed {
 function noteSource({ source, injections, emissions, incidents, lost }: SourceModel, notes: Note[]): void {
   const tell = (text: string) => notes.push({ partId: source.id, text });
   if (lost) tell(`${source.name} has no place yet, so what it adds is not known.`);
-  if (emissions.some(({ at }) => at === null)) tell(`${source.name} has no place outdoors, so what it adds is not known.`);
-  const unknown = [...injections, ...emissions, ...incidents].reduce((mask, power) => mask | power.unknown, 0);
+  if (emissions.some(({ at }) => at === null))
+    tell(`${source.name} has no place outdoors, so what it adds is not known.`);
+  const unknown = [...injections, ...emissions, ...incidents].reduce(
+    (mask, power) => mask | power.unknown,
+    0,
+  );
   if (unknown) tell(`${source.name} has no sound level ${bandNames(unknown)}.`);
 }
 
 /** Sources of a plan: where they put how much sound. What is missing becomes a note. */
-export function sourceModels(plan: Plan, rooms: readonly RoomModel[], elements: readonly ElementModel[], notes: Note[]): SourceModel[] {
+export function sourceModels(
+  plan: Plan,
+  rooms: readonly RoomModel[],
+  elements: readonly ElementModel[],
+  notes: Note[],
+): SourceModel[] {
   const around: Around = {
     plan,
     rooms: new Map(rooms.map((room) => [room.space.id, room])),

@@ -34,13 +34,19 @@ export function distanceToLine([x, y]: readonly number[], { p1, p2 }: Pick<Scree
   const [dx, dy] = [p2[0] - p1[0], p2[1] - p1[1]];
   const square = dx * dx + dy * dy;
   const along = square === 0 ? 0 : Math.min(1, Math.max(0, ((x - p1[0]) * dx + (y - p1[1]) * dy) / square));
-  return Math.hypot(x - p1[0] - along * dx, y - p1[1] - along * dy);
+  const [besideX, besideY] = [x - p1[0] - along * dx, y - p1[1] - along * dy];
+  return Math.sqrt(besideX * besideX + besideY * besideY);
 }
 
-export const standsOn = (place: Place, screen: Screen): boolean => distanceToLine(place, screen) <= ON_THE_LINE;
+export const standsOn = (place: Place, screen: Screen): boolean =>
+  distanceToLine(place, screen) <= ON_THE_LINE;
 
 /** Where a plan ray crosses a line: share of the ray, 0 to 1, or NaN. */
-export function crossing(from: readonly number[], to: readonly number[], { p1, p2 }: Pick<Screen, "p1" | "p2">): number {
+export function crossing(
+  from: readonly number[],
+  to: readonly number[],
+  { p1, p2 }: Pick<Screen, "p1" | "p2">,
+): number {
   const [rx, ry] = [to[0] - from[0], to[1] - from[1]];
   const [sx, sy] = [p2[0] - p1[0], p2[1] - p1[1]];
   const across = rx * sy - ry * sx;
@@ -74,7 +80,11 @@ export function detourOver(from: Place, to: Place, screen: Screen, share: number
   const [near, far] = [Math.max(0, share - half), Math.min(1, share + half)];
   const edges = [pointOn(from, to, near, screen.height), pointOn(from, to, far, screen.height)];
   const direct = lengthOf(from, to);
-  const [first, last, between] = [lengthOf(from, edges[0]), lengthOf(edges[1], to), lengthOf(edges[0], edges[1])];
+  const [first, last, between] = [
+    lengthOf(from, edges[0]),
+    lengthOf(edges[1], to),
+    lengthOf(edges[0], edges[1]),
+  ];
   const covers = [near, far].some((at) => screen.height > from[2] + at * (to[2] - from[2]));
   const longer = first + between + last - direct;
   return { z: covers ? longer : -longer, first, last, between, direct };
@@ -84,7 +94,12 @@ export function detourOver(from: Place, to: Place, screen: Screen, share: number
  * The detour that counts on a ray: of the screens it crosses the one with the largest path difference, top edge only;
  * null where none is crossed. `beyond` lifts the rule of the near side for a listener on a screen's line.
  */
-export function largestDetour(from: Place, to: Place, screens: readonly Screen[], beyond = false): Detour | null {
+export function largestDetour(
+  from: Place,
+  to: Place,
+  screens: readonly Screen[],
+  beyond = false,
+): Detour | null {
   let largest: Detour | null = null;
   for (const screen of screens) {
     if (standsOn(from, screen)) continue;
@@ -107,7 +122,7 @@ function weatherFactor({ z, first, last, direct }: Detour): number {
 /** C_3 of two edges `between` apart, ISO 9613-2 equation (15); 1 for one edge. */
 function doubleFactor(between: number, wavelength: number): number {
   if (between === 0) return 1;
-  const ratio = (5 * wavelength / between) ** 2;
+  const ratio = ((5 * wavelength) / between) ** 2;
   return (1 + ratio) / (1 / 3 + ratio);
 }
 

@@ -21,7 +21,11 @@ export function isBehind({ at, normal, isRoof }: Face, place: Place): boolean {
 /** Unit vectors across and up a face: across is horizontal; on a horizontal face across is x and up is y. */
 function axesOf([nx, ny, nz]: Place): [Place, Place] {
   const flat = Math.hypot(nx, ny);
-  if (flat < LEVEL) return [[1, 0, 0], [0, 1, 0]];
+  if (flat < LEVEL)
+    return [
+      [1, 0, 0],
+      [0, 1, 0],
+    ];
   const length = Math.hypot(flat, nz);
   const across: Place = [-ny / flat, nx / flat, 0];
   const [ux, uy, uz] = [nx / length, ny / length, nz / length];
@@ -35,7 +39,8 @@ function cuts(length: number, distance: number): number {
 /** How many parts [across, up] a face is cut into towards a place: [1, 1] from twice its longest side on. */
 export function cutTowards({ at, normal, size, isRoof }: Face, place: Place): [number, number] {
   if (!size || (!normal && !isRoof)) return [1, 1];
-  const distance = Math.max(NEAREST, Math.hypot(place[0] - at[0], place[1] - at[1], place[2] - at[2]));
+  const [x, y, z] = [place[0] - at[0], place[1] - at[1], place[2] - at[2]];
+  const distance = Math.max(NEAREST, Math.sqrt(x * x + y * y + z * z));
   if (distance >= 2 * Math.max(size[0], size[1])) return [1, 1];
   return [cuts(size[0], distance), cuts(size[1], distance)];
 }

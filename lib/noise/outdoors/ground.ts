@@ -30,7 +30,13 @@ export function groundShape(z: number): GroundShape {
  * Ground attenuation A_gr in dB over the nine bands, written to `out`: ISO 9613-2 7.3.1, general method, Table 3.
  * `across` is the distance on plan, m; 31.5 Hz takes the row of 63 Hz (solver method 0).
  */
-export function groundAttenuation(from: GroundShape, to: GroundShape, across: number, ground: Ground, out: Float64Array): void {
+export function groundAttenuation(
+  from: GroundShape,
+  to: GroundShape,
+  across: number,
+  ground: Ground,
+  out: Float64Array,
+): void {
   const reach = 30 * (from.height + to.height);
   const q = across <= reach ? 0 : 1 - reach / across;
   const near = 1 - Math.exp(-across / 50);
@@ -38,7 +44,11 @@ export function groundAttenuation(from: GroundShape, to: GroundShape, across: nu
   const [gs, gm, gr] = ground;
   const middle = -3 * q * (1 - gm);
   out[0] = out[1] = -3 - 3 * q;
-  out[2] = -3 + middle + gs * (1.5 + from.raised * near + from.low * far) + gr * (1.5 + to.raised * near + to.low * far);
+  out[2] =
+    -3 +
+    middle +
+    gs * (1.5 + from.raised * near + from.low * far) +
+    gr * (1.5 + to.raised * near + to.low * far);
   out[3] = -3 + middle + gs * (1.5 + from.b * near) + gr * (1.5 + to.b * near);
   out[4] = -3 + middle + gs * (1.5 + from.c * near) + gr * (1.5 + to.c * near);
   out[5] = -3 + middle + gs * (1.5 + from.d * near) + gr * (1.5 + to.d * near);

@@ -46,7 +46,9 @@ export function addRay(yard: Yard, from: End, to: End, factor: number, out: Floa
     // Behind a screen the ground's gain stays and its loss is inside D_z: the larger of the two losses holds.
     const lost = ground[band];
     const open = spread * Math.exp(-PER_DECIBEL * (yard.air[band] * distance + lost));
-    const bar = detour ? Math.max(1, lost > 0 ? screened[band] * Math.exp(-PER_DECIBEL * lost) : screened[band]) : 1;
+    const bar = detour
+      ? Math.max(1, lost > 0 ? screened[band] * Math.exp(-PER_DECIBEL * lost) : screened[band])
+      : 1;
     out[offset + band] += open / bar;
   }
 }

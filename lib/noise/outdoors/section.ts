@@ -46,7 +46,10 @@ export function cutOutline(section: Section, corners: readonly Corner[]): Stretc
     const next = corners[(i + 1) % corners.length];
     const [a, b] = [besideOf(section, corner), besideOf(section, next)];
     if (a === 0) found.push(alongOf(section, corner));
-    if (a * b < 0) found.push(alongOf(section, corner) + (a / (a - b)) * (alongOf(section, next) - alongOf(section, corner)));
+    if (a * b < 0)
+      found.push(
+        alongOf(section, corner) + (a / (a - b)) * (alongOf(section, next) - alongOf(section, corner)),
+      );
   });
   return found.length < 2 ? null : { from: Math.min(...found), to: Math.max(...found) };
 }
@@ -58,8 +61,16 @@ export function movedThrough(section: Section, corners: readonly Corner[]): Sect
   return { ...section, origin: [section.origin[0] - beside * dy, section.origin[1] + beside * dx] };
 }
 
-export function cornersOf({ at: [x, y], size: [width, depth] }: NonNullable<Space["box"]>): [number, number][] {
-  return [[x, y], [x + width, y], [x + width, y + depth], [x, y + depth]];
+export function cornersOf({
+  at: [x, y],
+  size: [width, depth],
+}: NonNullable<Space["box"]>): [number, number][] {
+  return [
+    [x, y],
+    [x + width, y],
+    [x + width, y + depth],
+    [x, y + depth],
+  ];
 }
 
 /** Top of a building's shell over a place on plan, m: a ridge in the middle along its axis, or flat. */
@@ -81,9 +92,17 @@ function ridgeAlong(section: Section, { footprint, ridgeAxis }: Building): numbe
 }
 
 /** Outline of a cut shell, [along, height], from the ground on the near side over the roof to the ground. */
-export function shellOutline(section: Section, building: Building, { from, to }: Stretch, top: number): [number, number][] {
+export function shellOutline(
+  section: Section,
+  building: Building,
+  { from, to }: Stretch,
+  top: number,
+): [number, number][] {
   const ridge = ridgeAlong(section, building);
   const over = [from, ...(ridge !== null && ridge > from && ridge < to ? [ridge] : []), to];
-  const roof = over.map((along): [number, number] => [along, roofHeight(building, top, placeAt(section, along, 0))]);
+  const roof = over.map((along): [number, number] => [
+    along,
+    roofHeight(building, top, placeAt(section, along, 0)),
+  ]);
   return [[from, 0], ...roof, [to, 0]];
 }

@@ -37,22 +37,49 @@ const NOTHING = new Float64Array(0);
 function elementEmitter(model: ElementModel, face: Face): Emitter {
   const { element, kind } = model;
   const { front, back } = directivityOf(element);
-  return { id: element.id, name: element.name, kind, element: model, source: -1, power: NOTHING, label: element.id, face, front, back, ends: new Map() };
+  return {
+    id: element.id,
+    name: element.name,
+    kind,
+    element: model,
+    source: -1,
+    power: NOTHING,
+    label: element.id,
+    face,
+    front,
+    back,
+    ends: new Map(),
+  };
 }
 
-function sourceEmitters({ source, emissions, index }: SourceModel): Emitter[] {
+/** What a source lets sound outdoors: itself, or the mouths of its runs. */
+export function sourceEmitters({ source, emissions, index }: SourceModel): Emitter[] {
   return emissions.flatMap(({ at, directivity, outlet, energy }): Emitter[] => {
     if (!at) return [];
     const face: Face = { at, normal: null, size: null, isRoof: false };
-    const shared = { element: null, source: index, power: energy, face, front: directivity, back: directivity, ends: new Map() };
+    const shared = {
+      element: null,
+      source: index,
+      power: energy,
+      face,
+      front: directivity,
+      back: directivity,
+      ends: new Map(),
+    };
     if (outlet) return [{ ...shared, id: outlet.id, name: outlet.name, kind: "duct", label: outlet.id }];
     return [{ ...shared, id: source.id, name: source.name, kind: "outdoor unit", label: null }];
   });
 }
 
 /** All emitters of a plan; `sounding` tells the rooms that sound can be in. */
-export function emittersOf(elements: readonly ElementModel[], sources: readonly SourceModel[], sounding: (room: number) => boolean): Emitter[] {
-  const faces = elements.flatMap((model) => (model.face && sounding(model.from) ? [elementEmitter(model, model.face)] : []));
+export function emittersOf(
+  elements: readonly ElementModel[],
+  sources: readonly SourceModel[],
+  sounding: (room: number) => boolean,
+): Emitter[] {
+  const faces = elements.flatMap((model) =>
+    model.face && sounding(model.from) ? [elementEmitter(model, model.face)] : [],
+  );
   return [...faces, ...sources.flatMap(sourceEmitters)];
 }
 
@@ -71,15 +98,15 @@ export function mayArrive({ element }: Emitter, point: Point): boolean {
 }
 
 /** Adds to `out` the energy at a point of an emitter of power 1, free field (solver method 5 and 6). */
-export function addTravel(yard: Yard, emitter: Emitter, { end, face }: Point, out: Float64Array, offset: number): void {
+export function addTravel(
+  yard: Yard,
+  emitter: Emitter,
+  { end, face }: Point,
+  out: Float64Array,
+  offset: number,
+): void {
   const directed = isBehind(emitter.face, end.at) ? emitter.back : emitter.front;
   const shaded = face && isBehind(face, emitter.face.at) ? BEHIND_FACADE : 1;
   const ends = endsTowards(emitter, end.at);
   for (const from of ends) addRay(yard, from, end, (directed * shaded) / ends.length, out, offset);
-}
-
-/** Rays of an emitter to a point: one, or as many as its face is cut into. */
-export function countRays(emitter: Emitter, { end }: Point): number {
-  const [across, up] = cutTowards(emitter.face, end.at);
-  return across * up;
 }

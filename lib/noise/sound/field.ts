@@ -8,6 +8,7 @@ import { airAttenuations } from "../outdoors/air";
 import { endAt, type Yard } from "../outdoors/ray";
 import type { Plan, Receiver } from "../plan";
 import type { Note } from "../verdict";
+import { arrivedOf } from "./arrived";
 import { addTravel, emittersOf, mayArrive, type Emitter, type Point } from "./emitters";
 
 /** The plan as arrays: rooms balanced, emitters and the places their sound arrives at, all per source at full power. */
@@ -24,8 +25,10 @@ export interface Field {
   /** Point of an element by its index, and of an outdoor listener by its id. */
   readonly pointOfElement: ReadonlyMap<number, number>;
   readonly pointOfReceiver: ReadonlyMap<string, number>;
-  /** Energy in a room, [(source * rooms + room) * bands + band]. */
+  /** Energy in a room of what sounds in its own group of rooms, [(source * rooms + room) * bands + band]. */
   readonly inside: Float64Array;
+  /** Energy in a room of what entered from outdoors, in the same order. */
+  readonly arrived: Float64Array;
   /** Power of an emitter, pW, [(emitter * sources + source) * bands + band]. */
   readonly emitted: Float64Array;
   /** Energy at a point of an emitter of power 1, [(point * emitters + emitter) * bands + band]. */
@@ -36,14 +39,19 @@ export function yardOf({ lot, fences }: Plan): Yard {
   return { air: airAttenuations(lot.temperature, lot.humidity), ground: lot.ground, screens: fences };
 }
 
-function insideOf(rooms: readonly RoomModel[], sources: readonly SourceModel[], { inverse }: Balance): Float64Array {
+function insideOf(
+  rooms: readonly RoomModel[],
+  sources: readonly SourceModel[],
+  { inverse }: Balance,
+): Float64Array {
   const count = rooms.length;
   const inside = new Float64Array(sources.length * count * BAND_COUNT);
   for (const { index, injections } of sources) {
     for (const { room, energy } of injections) {
       for (let i = 0; i < count; i += 1) {
         for (let band = 0; band < BAND_COUNT; band += 1) {
-          inside[(index * count + i) * BAND_COUNT + band] += 4 * energy[band] * inverse[(band * count + i) * count + room];
+          inside[(index * count + i) * BAND_COUNT + band] +=
+            4 * energy[band] * inverse[(band * count + i) * count + room];
         }
       }
     }
@@ -52,7 +60,12 @@ function insideOf(rooms: readonly RoomModel[], sources: readonly SourceModel[], 
 }
 
 /** Radiated power L_W = L_p + C_d - R + 10 lg S of elements (EN 12354-4), own power of the rest. */
-function emittedOf(emitters: readonly Emitter[], rooms: number, sources: number, inside: Float64Array): Float64Array {
+function emittedOf(
+  emitters: readonly Emitter[],
+  rooms: number,
+  sources: number,
+  [inside, arrived]: [Float64Array, Float64Array],
+): Float64Array {
   const emitted = new Float64Array(emitters.length * sources * BAND_COUNT);
   emitters.forEach(({ element, source, power }, m) => {
     for (let s = 0; s < sources; s += 1) {
@@ -60,7 +73,8 @@ function emittedOf(emitters: readonly Emitter[], rooms: number, sources: number,
       if (element) {
         const from = (s * rooms + element.from) * BAND_COUNT;
         for (let band = 0; band < BAND_COUNT; band += 1) {
-          emitted[at + band] = inside[from + band] * element.passing[band] * element.diffuse;
+          emitted[at + band] =
+            (inside[from + band] + arrived[from + band]) * element.passing[band] * element.diffuse;
         }
       } else if (s === source) emitted.set(power, at);
     }
@@ -72,14 +86,19 @@ function travelOf(yard: Yard, emitters: readonly Emitter[], points: readonly Poi
   const travel = new Float64Array(points.length * emitters.length * BAND_COUNT);
   points.forEach((point, p) => {
     emitters.forEach((emitter, m) => {
-      if (mayArrive(emitter, point)) addTravel(yard, emitter, point, travel, (p * emitters.length + m) * BAND_COUNT);
+      if (mayArrive(emitter, point))
+        addTravel(yard, emitter, point, travel, (p * emitters.length + m) * BAND_COUNT);
     });
   });
   return travel;
 }
 
 /** Where sound from outdoors has to be known: at elements of a listener's group of rooms, and at outdoor listeners. */
-function pointsOf(elements: readonly ElementModel[], receivers: readonly Receiver[], listening: (room: number) => boolean) {
+function pointsOf(
+  elements: readonly ElementModel[],
+  receivers: readonly Receiver[],
+  listening: (room: number) => boolean,
+) {
   const points: Point[] = [];
   const pointOfElement = new Map<number, number>();
   const pointOfReceiver = new Map<string, number>();
@@ -106,21 +125,46 @@ export function roomIndexOf(rooms: readonly RoomModel[], receiver: Receiver): nu
   return receiver.kind === "room" ? rooms.findIndex(({ space }) => space.id === receiver.spaceId) : -1;
 }
 
+/** Rooms that any sound is in: made there, or come in from outdoors. */
+function soundingRooms(sources: readonly SourceModel[], rooms: number, arrived: Float64Array): number[] {
+  const reached = (room: number) =>
+    sources.some(({ index }) => {
+      const start = (index * rooms + room) * BAND_COUNT;
+      return arrived.subarray(start, start + BAND_COUNT).some((each) => each > 0);
+    });
+  const made = sources.flatMap(({ injections }) => injections.map(({ room }) => room));
+  return [...made, ...Array.from({ length: rooms }, (_, room) => room).filter(reached)];
+}
+
 /** Reckons everything that does not depend on who listens when: solver method 8, steps 2 to 4. */
 export function fieldOf(plan: Plan, losses: ReadonlyMap<string, EffectiveLoss>, notes: Note[]): Field {
   const rooms = roomModels(plan, notes);
   const { elements, passings } = elementModels(plan, losses, rooms, notes);
   const sources = sourceModels(plan, rooms, elements, notes);
-  const balance = balanceRooms(rooms.map(({ absorption }) => absorption), elements);
+  const balance = balanceRooms(
+    rooms.map(({ absorption }) => absorption),
+    elements,
+  );
   const yard = yardOf(plan);
-  const sounding = groupsOf(balance, sources.flatMap(({ injections }) => injections.map(({ room }) => room)));
+  const arrived = arrivedOf(yard, elements, sources, balance);
+  const sounding = groupsOf(balance, soundingRooms(sources, rooms.length, arrived));
   const heard = plan.receivers.map((receiver) => roomIndexOf(rooms, receiver)).filter((room) => room >= 0);
   const emitters = emittersOf(elements, sources, sounding);
   const arrivals = pointsOf(elements, plan.receivers, groupsOf(balance, heard));
   const inside = insideOf(rooms, sources, balance);
   return {
-    plan, yard, rooms, elements, passings, sources, balance, emitters, ...arrivals, inside,
-    emitted: emittedOf(emitters, rooms.length, sources.length, inside),
+    plan,
+    yard,
+    rooms,
+    elements,
+    passings,
+    sources,
+    balance,
+    emitters,
+    ...arrivals,
+    inside,
+    arrived,
+    emitted: emittedOf(emitters, rooms.length, sources.length, [inside, arrived]),
     travel: travelOf(yard, emitters, arrivals.points),
   };
 }

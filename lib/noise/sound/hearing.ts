@@ -47,7 +47,9 @@ function entriesOf({ elements, balance, pointOfElement }: Field, room: number): 
   const { count, groups, inverse } = balance;
   return elements.flatMap((element) => {
     if (element.to >= 0 || groups[element.from] !== groups[room] || element.open === 0) return [];
-    const gain = element.passing.map((area, band) => ENTERING * area * 4 * inverse[(band * count + room) * count + element.from]);
+    const gain = element.passing.map(
+      (area, band) => ENTERING * area * 4 * inverse[(band * count + room) * count + element.from],
+    );
     return [{ element, point: pointOfElement.get(element.index) ?? -1, gain }];
   });
 }
@@ -56,7 +58,9 @@ function passagesOf({ elements, balance: { count, diagonal } }: Field, room: num
   return elements.flatMap((element) => {
     if (element.to < 0 || (element.from !== room && element.to !== room)) return [];
     const from = element.from === room ? element.to : element.from;
-    const gain = element.passing.map((area, band) => (diagonal[band * count + room] > 0 ? area / diagonal[band * count + room] : 0));
+    const gain = element.passing.map((area, band) =>
+      diagonal[band * count + room] > 0 ? area / diagonal[band * count + room] : 0,
+    );
     return [{ element, from, gain }];
   });
 }
@@ -72,7 +76,11 @@ function distanceTo({ distances, position }: Receiver, { source }: SourceModel):
 }
 
 /** L_p = L_W + 10 lg(Q/(4 pi r^2) + 4/A) in the source's own room, with the balance's A + sum g (solver method 4). */
-function ownOf({ sources, balance: { count, diagonal } }: Field, receiver: Receiver, room: number): Float64Array {
+function ownOf(
+  { sources, balance: { count, diagonal } }: Field,
+  receiver: Receiver,
+  room: number,
+): Float64Array {
   const own = new Float64Array(sources.length * BAND_COUNT);
   for (const model of sources) {
     if (!model.injections.some((injection) => injection.room === room)) continue;
@@ -87,7 +95,11 @@ function ownOf({ sources, balance: { count, diagonal } }: Field, receiver: Recei
 }
 
 /** Energy at the listener per power of each emitter: over all entries, or straight to an outdoor listener. */
-function outdoorsOf({ emitters, points, travel, pointOfReceiver }: Field, receiver: Receiver, entries: readonly Entry[]): Float64Array {
+function outdoorsOf(
+  { emitters, points, travel, pointOfReceiver }: Field,
+  receiver: Receiver,
+  entries: readonly Entry[],
+): Float64Array {
   const count = emitters.length * BAND_COUNT;
   const outdoors = new Float64Array(count);
   const point = pointOfReceiver.get(receiver.id);
@@ -98,18 +110,25 @@ function outdoorsOf({ emitters, points, travel, pointOfReceiver }: Field, receiv
   for (const { point: at, gain } of entries) {
     if (at < 0 || at >= points.length) continue;
     for (let m = 0; m < count; m += BAND_COUNT) {
-      for (let band = 0; band < BAND_COUNT; band += 1) outdoors[m + band] += travel[at * count + m + band] * gain[band];
+      for (let band = 0; band < BAND_COUNT; band += 1)
+        outdoors[m + band] += travel[at * count + m + band] * gain[band];
     }
   }
   return outdoors;
 }
 
 /** Energy of one source at full power at the listener, over all ways. */
-function energyOfSource(field: Field, parts: Omit<Hearing, "bySource" | "unknown">, source: SourceModel, out: Float64Array): void {
+function energyOfSource(
+  field: Field,
+  parts: Omit<Hearing, "bySource" | "unknown">,
+  source: SourceModel,
+  out: Float64Array,
+): void {
   const { rooms, sources, emitters, inside, emitted } = field;
   const at = source.index * BAND_COUNT;
   for (const { room, energy } of source.injections) {
-    if (room === parts.room) for (let b = 0; b < BAND_COUNT; b += 1) out[at + b] += energy[b] * parts.own[at + b];
+    if (room === parts.room)
+      for (let b = 0; b < BAND_COUNT; b += 1) out[at + b] += energy[b] * parts.own[at + b];
   }
   for (const { from, gain } of parts.passages) {
     const start = (source.index * rooms.length + from) * BAND_COUNT;
@@ -117,7 +136,8 @@ function energyOfSource(field: Field, parts: Omit<Hearing, "bySource" | "unknown
   }
   for (let m = 0; m < emitters.length; m += 1) {
     const start = (m * sources.length + source.index) * BAND_COUNT;
-    for (let b = 0; b < BAND_COUNT; b += 1) out[at + b] += emitted[start + b] * parts.outdoors[m * BAND_COUNT + b];
+    for (let b = 0; b < BAND_COUNT; b += 1)
+      out[at + b] += emitted[start + b] * parts.outdoors[m * BAND_COUNT + b];
   }
   for (const { element, energy } of source.incidents) {
     const entry = parts.entries.find((each) => each.element.index === element);
@@ -144,6 +164,8 @@ export function hear(field: Field, receiver: Receiver, spread: SpreadFrom | null
   };
   const bySource = new Float64Array(field.sources.length * BAND_COUNT);
   field.sources.forEach((source) => energyOfSource(field, parts, source, bySource));
-  const unknown = field.sources.map((source) => (!parts.placed ? ALL_BANDS : spread ? unknownAt(field, source, room, spread) : 0));
+  const unknown = field.sources.map((source) =>
+    !parts.placed ? ALL_BANDS : spread ? unknownAt(field, source, room, spread) : 0,
+  );
   return { ...parts, bySource, unknown };
 }

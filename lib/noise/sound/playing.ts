@@ -19,9 +19,15 @@ export interface Playing {
  * Weights of the sources in a situation. Over the whole period a source counts with the share of the time it runs, in
  * the loudest part in full (solver method 6). Without a situation everything runs; what is not named is off.
  */
-export function weightsOf({ sources }: Field, situation: Situation | null, averaging: Criterion["averaging"]): Float64Array {
+export function weightsOf(
+  { sources }: Field,
+  situation: Situation | null,
+  averaging: Criterion["averaging"],
+): Float64Array {
   if (!situation) return new Float64Array(sources.length).fill(1);
-  const shares = new Map(situation.playing.map(({ sourceId, share }) => [sourceId, averaging === "whole" ? share : 1]));
+  const shares = new Map(
+    situation.playing.map(({ sourceId, share }) => [sourceId, averaging === "whole" ? share : 1]),
+  );
   return Float64Array.from(sources, ({ source }) => shares.get(source.id) ?? 0);
 }
 
@@ -41,22 +47,29 @@ function mixBySource(table: Float64Array, things: number, weights: Float64Array)
 function mixInside({ inside, rooms }: Field, weights: Float64Array): Float64Array {
   const length = rooms.length * BAND_COUNT;
   const mixed = new Float64Array(length);
-  for (let s = 0; s < weights.length; s += 1) for (let i = 0; i < length; i += 1) mixed[i] += weights[s] * inside[s * length + i];
+  for (let s = 0; s < weights.length; s += 1)
+    for (let i = 0; i < length; i += 1) mixed[i] += weights[s] * inside[s * length + i];
   return mixed;
 }
 
-function arrivingOf({ points, emitters, travel, sources, pointOfElement }: Field, emitted: Float64Array, weights: Float64Array): Float64Array {
+function arrivingOf(
+  { points, emitters, travel, sources, pointOfElement }: Field,
+  emitted: Float64Array,
+  weights: Float64Array,
+): Float64Array {
   const arriving = new Float64Array(points.length * BAND_COUNT);
   for (let p = 0; p < points.length; p += 1) {
     const start = p * emitters.length * BAND_COUNT;
     for (let m = 0; m < emitted.length; m += BAND_COUNT) {
-      for (let b = 0; b < BAND_COUNT; b += 1) arriving[p * BAND_COUNT + b] += emitted[m + b] * travel[start + m + b];
+      for (let b = 0; b < BAND_COUNT; b += 1)
+        arriving[p * BAND_COUNT + b] += emitted[m + b] * travel[start + m + b];
     }
   }
   for (const { index, incidents } of sources) {
     for (const { element, energy } of incidents) {
       const point = pointOfElement.get(element);
-      if (point !== undefined) energy.forEach((each, b) => (arriving[point * BAND_COUNT + b] += weights[index] * each));
+      if (point !== undefined)
+        energy.forEach((each, b) => (arriving[point * BAND_COUNT + b] += weights[index] * each));
     }
   }
   return arriving;
@@ -65,5 +78,11 @@ function arrivingOf({ points, emitters, travel, sources, pointOfElement }: Field
 export function play(field: Field, situation: Situation | null, averaging: Criterion["averaging"]): Playing {
   const weights = weightsOf(field, situation, averaging);
   const emitted = mixBySource(field.emitted, field.emitters.length, weights);
-  return { situation, weights, inside: mixInside(field, weights), emitted, arriving: arrivingOf(field, emitted, weights) };
+  return {
+    situation,
+    weights,
+    inside: mixInside(field, weights),
+    emitted,
+    arriving: arrivingOf(field, emitted, weights),
+  };
 }

@@ -19,8 +19,11 @@ export function hasUnknown({ rooms, elements, sources }: Field): boolean {
   return (
     rooms.some(({ unknown }) => unknown !== 0) ||
     elements.some(({ unknown, face, to }) => unknown !== 0 || (to < 0 && !face)) ||
-    sources.some(({ lost, injections, emissions, incidents }) =>
-      lost !== 0 || [...injections, ...emissions, ...incidents].some(({ unknown }) => unknown !== 0) || emissions.some(({ at }) => !at),
+    sources.some(
+      ({ lost, injections, emissions, incidents }) =>
+        lost !== 0 ||
+        [...injections, ...emissions, ...incidents].some(({ unknown }) => unknown !== 0) ||
+        emissions.some(({ at }) => !at),
     )
   );
 }
@@ -30,7 +33,12 @@ type Way = { from: number; to: number; element: ElementModel };
 /** Ways between rooms, both directions. */
 function waysBetween(elements: readonly ElementModel[]): Way[] {
   return elements.flatMap((element) =>
-    element.to < 0 ? [] : [{ from: element.from, to: element.to, element }, { from: element.to, to: element.from, element }],
+    element.to < 0
+      ? []
+      : [
+          { from: element.from, to: element.to, element },
+          { from: element.to, to: element.from, element },
+        ],
   );
 }
 
@@ -40,7 +48,7 @@ function spreadFrom(start: number, rooms: readonly RoomModel[], ways: readonly W
   const tainted = new Int32Array(rooms.length);
   open[start] = ALL_BANDS;
   tainted[start] = rooms[start].unknown;
-  for (let changed = true; changed; ) {
+  for (let changed = true; changed;) {
     changed = false;
     for (const { from, to, element } of ways) {
       if (to === start) continue;
@@ -77,7 +85,11 @@ function add(outdoors: Outdoors, building: string, open: BandMask, tainted: Band
 }
 
 /** Bands in which a source may leave each building, and where that is not known. */
-function leavingOf({ elements }: Field, { injections, emissions }: SourceModel, spread: SpreadFrom): Outdoors {
+function leavingOf(
+  { elements }: Field,
+  { injections, emissions }: SourceModel,
+  spread: SpreadFrom,
+): Outdoors {
   const outdoors: Outdoors = new Map();
   for (const { at, heard, unknown } of emissions) add(outdoors, "", heard, at ? unknown : heard);
   for (const { room, heard, unknown } of injections) {

@@ -21,10 +21,13 @@ type Ply = {
   poisson: number;
   eta: number;
   family: string;
+  /** Whether the fitted loss factor of gypsum boards holds: plain and fire rated board, which the measured walls have. */
+  fitted: boolean;
 };
 
 const THICK_PLATE = 0.04;
 const GYPSUM_ETA = 0.08; // fitted: edge and fastener friction included
+const FITTED_BOARDS: readonly string[] = ["gypsum", "gypsum_x"]; // dense board is not among the measured walls
 const DAMPED_ETA = 0.25; // engineering estimate, no open measurement behind it
 const SCREWED_FRICTION = 1.5;
 
@@ -61,12 +64,20 @@ function layLeaf({ plies: pairs, bond, eta }: PliedLeafDescription): Leaf {
 function plyOf(material: PlyMaterial, thickness: number): Ply {
   if (typeof material !== "string") {
     const { rho, E, nu, eta } = material;
-    return { thickness, density: rho, modulus: E, poisson: nu, eta, family: "own" };
+    return { thickness, density: rho, modulus: E, poisson: nu, eta, family: "own", fitted: false };
   }
   const record = findMaterial(material);
   if (!record) throw new Error(`no material is called "${material}"`);
   const { density, youngsModulus, poissonRatio, lossFactor, family } = record;
-  return { thickness, density, modulus: youngsModulus, poisson: poissonRatio, eta: lossFactor, family };
+  return {
+    thickness,
+    density,
+    modulus: youngsModulus,
+    poisson: poissonRatio,
+    eta: lossFactor,
+    family,
+    fitted: FITTED_BOARDS.includes(material),
+  };
 }
 
 function bendingStiffness({ modulus, thickness, poisson }: Ply): number {
@@ -92,7 +103,7 @@ function gluedStiffness(plies: readonly Ply[]): number {
 
 function lossFactorOf(plies: readonly Ply[], bond: PliedLeafDescription["bond"]): number {
   if (bond === "damped" && plies.length > 1) return DAMPED_ETA;
-  if (plies.some(({ family }) => family === "gypsum")) return GYPSUM_ETA;
+  if (plies.some(({ fitted }) => fitted)) return GYPSUM_ETA;
   const weights = plies.map(({ modulus, thickness }) => modulus * thickness ** 3);
   const total = weights.reduce((sum, weight) => sum + weight, 0);
   const mean = plies.reduce((sum, { eta }, i) => sum + eta * weights[i], 0) / total;

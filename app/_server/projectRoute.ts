@@ -1,0 +1,151 @@
+import "server-only";
+import { fn, type Transaction } from "sequelize";
+import { Project, Revision, User, type Act } from "@/models";
+import { advancePlan, readPlan, type StoredPlan } from "@/models/parts";
+import type { ActName } from "./access";
+import { answer, jsonAnswer, renewed, requireReader } from "./answer";
+import { Refusal } from "./errors";
+import type { Reader } from "./identity";
+import { answerOf, openProject, readUnlessKept, type Opened } from "./projects";
+import { readBody, readRevision, requireSameOrigin } from "./request";
+import { inOneMoment, inTransaction } from "./transactions";
+import { keptPlan } from "./weigh";
+
+type Ids = { projectId: string };
+type Route<P> = (request: Request, context: { params: Promise<P> }) => Promise<Response>;
+type ActOf<P> = ActName | ((params: P) => ActName);
+
+const actOf = <P>(act: ActOf<P>, params: P): ActName => (typeof act === "function" ? act(params) : act);
+
+interface Reading<P> {
+  params: P;
+  opened: Opened;
+  transaction: Transaction;
+}
+
+/** A route that reads a project. `read` gathers inside the transaction and gives what makes the answer outside it. */
+export function projectRead<P extends Ids>(act: ActOf<P>, read: (given: Reading<P>) => Promise<() => object>): Route<P> {
+  return (request, context) =>
+    answer(async () => {
+      const reader = await requireReader(request);
+      const params = await context.params;
+      const finish = await inOneMoment(async (transaction) => {
+        const opened = await openProject({ reader, projectId: params.projectId, act: actOf(act, params), transaction });
+        return read({ params, opened, transaction });
+      });
+      return renewed(jsonAnswer(finish()), reader);
+    });
+}
+
+interface Change<P> {
+  params: P;
+  projectId: string;
+  project: Project;
+  body: Record<string, unknown>;
+  transaction: Transaction;
+}
+
+/**
+ * A route that changes a plan. `change` does it and gives the touched parts; around it stand origin, identity, right, the
+ * revision it was made on, the project's lock, the record of the change, and the answer with the plan weighed anew.
+ */
+export function projectRoute<P extends Ids>(act: ActOf<P>, change: (given: Change<P>) => Promise<Act[]>): Route<P> {
+  return (request, context) =>
+    answer(async () => {
+      requireSameOrigin(request);
+      const reader = await requireReader(request);
+      const params = await context.params;
+      const body = request.method === "DELETE" ? {} : await readBody(request);
+      const made = { reader, params, act: actOf(act, params), made: readRevision(request) };
+      try {
+        const { project, stored } = await inTransaction((transaction) =>
+          changed({ ...made, transaction }, (project) =>
+            change({ params, projectId: params.projectId, project, body, transaction }),
+          ),
+        );
+        return await renewed(jsonAnswer(answerOf(project, stored)), reader);
+      } catch (thrown) {
+        if (thrown instanceof Stale) return await staleAnswer(thrown);
+        throw thrown;
+      }
+    });
+}
+
+interface Making {
+  reader: Reader;
+  params: Ids;
+  act: ActName;
+  made: number | undefined;
+  transaction: Transaction;
+}
+
+async function changed({ reader, params, act, made, transaction }: Making, change: (project: Project) => Promise<Act[]>) {
+  const { projectId } = params;
+  const { project, role } = await openProject({ reader, projectId, act, transaction });
+  if (made === undefined) throw new Refusal("revision needed", "Say which revision this change was made on (If-Match).");
+  // Who is late is told before anybody waits for the lock.
+  if (project.revision !== made) throw new Stale(projectId, made);
+  await project.reload({ lock: transaction.LOCK.UPDATE, transaction });
+  if (project.revision !== made) throw new Stale(projectId, made);
+  const acts = await change(project);
+  const plan = keptPlan(projectId, made);
+  if (acts.length) await record({ project, acts, reader, role, transaction });
+  // Under the lock the plan of the revision before is the rows as they stood: no need to read them all again.
+  const stored = plan ? { plan: advancePlan(plan, acts), damage: [] } : await readPlan(projectId, transaction);
+  return { project, stored };
+}
+
+interface Recording {
+  project: Project;
+  acts: Act[];
+  reader: Reader;
+  role: string;
+  transaction: Transaction;
+}
+
+async function record({ project, acts, reader, role, transaction }: Recording) {
+  const revision = project.revision + 1;
+  const row = { projectId: project.id, revision, userId: reader.id, role, acts };
+  await Revision.create(row, { fields: ["projectId", "revision", "userId", "role", "acts"], transaction });
+  const changedAt = fn("now") as unknown as Date; // the database's time
+  await project.update({ revision, changedAt }, { fields: ["revision", "changedAt"], transaction });
+}
+
+/** Somebody changed the plan since the revision this change was made on. */
+class Stale extends Error {
+  constructor(
+    readonly projectId: string,
+    readonly made: number,
+  ) {
+    super("stale");
+  }
+}
+
+/** 409 with the plan as it stands now, who changed it, and which parts they touched. */
+async function staleAnswer({ projectId, made }: Stale): Promise<Response> {
+  const { project, stored, since } = await inOneMoment(async (transaction) => {
+    const project = await Project.findOne({ where: { id: projectId }, rejectOnEmpty: true, transaction });
+    const stored: StoredPlan | undefined = await readUnlessKept(project, transaction);
+    return { project, stored, since: await revisionsSince(projectId, made, transaction) };
+  });
+  const last = since.at(-1);
+  const name = last?.user?.name ?? "Somebody";
+  const changedBy = { name, at: last?.at ?? project.changedAt, parts: since.flatMap(({ acts }) => acts) };
+  const more = { current: answerOf(project, stored), changedBy };
+  const refusal = new Refusal("conflict", `${name} changed this yard in the meantime.`, { more });
+  return answer(() => Promise.reject(refusal));
+}
+
+/** At most a hundred changes: who is further behind sees the plan as a whole. */
+async function revisionsSince(projectId: string, made: number, transaction: Transaction) {
+  const rows = await Revision.findAll({
+    where: { projectId },
+    include: [{ model: User, as: "user", attributes: ["name"] }],
+    order: [["revision", "DESC"]],
+    limit: 100,
+    transaction,
+  });
+  // Read with the user above.
+  const named = rows as (Revision & { user: { name: string } | null })[];
+  return named.filter(({ revision }) => revision > made).reverse();
+}

@@ -1,0 +1,19 @@
+import "server-only";
+import { z } from "zod";
+import { User } from "@/models";
+import { answer, emptyAnswer, renewed, requireReader } from "./answer";
+import { readBody, requireSameOrigin } from "./request";
+import { read } from "./sessionRoutes";
+
+const settings = z.strictObject({ theme: z.enum(["light", "dark", "system"]) });
+
+/** Keeps the reader's own settings. */
+export function settingsRoute(request: Request): Promise<Response> {
+  return answer(async () => {
+    requireSameOrigin(request);
+    const reader = await requireReader(request);
+    const { theme } = read(settings, await readBody(request));
+    await User.update({ theme }, { where: { id: reader.id }, fields: ["theme"] });
+    return renewed(emptyAnswer(), reader);
+  });
+}

@@ -1,0 +1,3 @@
+import { reportRoute } from "@/app/_server/reports";
+
+export const POST = reportRoute;

@@ -1,0 +1,6 @@
+export const dynamic = "force-dynamic";
+
+/** Says that this process answers; it asks nobody else. */
+export function GET(): Response {
+  return Response.json({ up: true });
+}

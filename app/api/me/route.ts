@@ -1,0 +1,3 @@
+import { settingsRoute } from "@/app/_server/settingsRoute";
+
+export const PATCH = settingsRoute;

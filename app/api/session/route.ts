@@ -1,0 +1,4 @@
+import { signInRoute, signOutRoute } from "@/app/_server/sessionRoutes";
+
+export const POST = signInRoute;
+export const DELETE = signOutRoute;

@@ -1,0 +1,27 @@
+/** Every address of the product, glued once. */
+export const projectsAddress = "/projects";
+export const budgetAddress = (projectId: string) => `/projects/${projectId}`;
+export const wallsAddress = (projectId: string) => `${budgetAddress(projectId)}/walls`;
+export const elementAddress = (projectId: string, elementId: string) => `${wallsAddress(projectId)}/${elementId}`;
+
+/** The sign-in page; `next` is where the reader wanted to go. */
+export function signInAddress(next?: string): string {
+  return next ? `/sign-in?${new URLSearchParams({ next })}` : "/sign-in";
+}
+
+/** A way back that stays in the product: a path of ours, or the list of yards. */
+export function ownAddress(next: string | undefined): string {
+  const ours = next !== undefined && /^\/(?![/\\])[\w\-./~%?=&]*$/.test(next) && !next.startsWith("/api/");
+  return ours ? next : projectsAddress;
+}
+
+export const sessionRoute = "/api/session";
+export const meRoute = "/api/me";
+export const projectRouteAddress = (projectId: string) => `/api/projects/${projectId}`;
+export const verdictRoute = (projectId: string, receiverId: string) =>
+  `${projectRouteAddress(projectId)}/verdict/${receiverId}`;
+
+/** A kind of part, or one part of it: "elements", "receivers" ... */
+export function partRoute(projectId: string, part: string, id?: string): string {
+  return [projectRouteAddress(projectId), part, ...(id ? [id] : [])].join("/");
+}

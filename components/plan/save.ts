@@ -1,0 +1,107 @@
+import { partRoute, projectRouteAddress } from "../addresses";
+import type { Answer } from "../state/plan";
+
+/** What happened to one part of a plan. */
+export interface TouchedPart {
+  kind: string;
+  id: string;
+  act: "add" | "change" | "remove";
+  before: Record<string, unknown> | null;
+  after: Record<string, unknown> | null;
+}
+
+export interface ChangedBy {
+  name: string;
+  /** ISO 8601. */
+  at: string;
+  parts: TouchedPart[];
+}
+
+export type Saved =
+  | { kind: "saved"; answer: Answer }
+  | { kind: "stale"; current: Answer; changedBy: ChangedBy }
+  | { kind: "refused"; message: string; fields: Record<string, string> }
+  | { kind: "signedOut"; message: string }
+  | { kind: "gone"; message: string }
+  | { kind: "failed"; message: string };
+
+export interface Written {
+  projectId: string;
+  revision: number;
+  /** The segment of the address: "elements", "receivers" ... */
+  part: string;
+}
+
+type Values = Record<string, unknown>;
+
+/** Changes one part. */
+export function savePart({ id, patch, ...written }: Written & { id: string; patch: Values }): Promise<Saved> {
+  const address = partRoute(written.projectId, written.part, id);
+  return write({ method: "PATCH", address, body: patch }, written.revision, (touched) => touched.has(id));
+}
+
+/** Removes one part and what belongs to it; never replayed by itself. */
+export function removePart({ id, ...written }: Written & { id: string }): Promise<Saved> {
+  const address = partRoute(written.projectId, written.part, id);
+  return write({ method: "DELETE", address }, written.revision, () => true);
+}
+
+/** Adds a part; what others changed meanwhile does not stand in its way. */
+export function addPart({ values, ...written }: Written & { values: Values }): Promise<Saved> {
+  const address = partRoute(written.projectId, written.part);
+  return write({ method: "POST", address, body: values }, written.revision, () => false);
+}
+
+/** Renames, archives or restores a yard. */
+export function saveProject({ projectId, revision, patch }: { projectId: string; revision: number; patch: Values }): Promise<Saved> {
+  const address = projectRouteAddress(projectId);
+  return write({ method: "PATCH", address, body: patch }, revision, (touched) => touched.has(projectId));
+}
+
+interface Request {
+  method: "PATCH" | "POST" | "DELETE";
+  address: string;
+  body?: Values;
+}
+
+/** Sends a change; when somebody else was quicker and touched nothing this change touches, sends it once more. */
+async function write(request: Request, revision: number, collides: (touched: ReadonlySet<string>) => boolean): Promise<Saved> {
+  const first = await send(request, revision);
+  if (first.kind !== "stale") return first;
+  const touched = new Set(first.changedBy.parts.map(({ id }) => id));
+  return collides(touched) ? first : send(request, first.current.revision);
+}
+
+const SECONDS = 30;
+
+async function send({ method, address, body }: Request, revision: number): Promise<Saved> {
+  try {
+    const response = await fetch(address, {
+      method,
+      headers: { "If-Match": `"${revision}"`, ...(body && { "Content-Type": "application/json" }) },
+      body: body && JSON.stringify(body),
+      signal: AbortSignal.timeout(SECONDS * 1000),
+    });
+    return await savedOf(response);
+  } catch {
+    return { kind: "failed", message: "No answer from the server. What you typed is kept here; try again." };
+  }
+}
+
+/** The error part of an answer, as the routes write it. */
+interface ErrorAnswer {
+  error: { message: string; fields?: Record<string, string> };
+  current?: Answer;
+  changedBy?: ChangedBy;
+}
+
+async function savedOf(response: Response): Promise<Saved> {
+  if (response.ok) return { kind: "saved", answer: (await response.json()) as Answer };
+  const { error, current, changedBy } = (await response.json()) as ErrorAnswer;
+  const { message, fields = {} } = error;
+  if (response.status === 409 && current && changedBy) return { kind: "stale", current, changedBy };
+  if (response.status === 401) return { kind: "signedOut", message };
+  if (response.status === 404) return { kind: "gone", message };
+  if (response.status >= 500 || response.status === 429) return { kind: "failed", message };
+  return { kind: "refused", message, fields };
+}

@@ -1,0 +1,38 @@
+"use client";
+
+import { Button, LinkButton } from "../ui/Button";
+import { Strip } from "../ui/Strip";
+
+export type Trouble = { kind: "signedOut" } | { kind: "failed"; message: string };
+
+interface Props {
+  trouble: Trouble;
+  signInHref: string;
+  onRetry: () => void;
+}
+
+/** A save that did not arrive. What was typed stays where it stands. */
+export function SaveTrouble({ trouble, signInHref, onRetry }: Props) {
+  if (trouble.kind === "signedOut") {
+    return (
+      <Strip
+        kind="error"
+        heading="You are signed out."
+        action={<LinkButton href={signInHref}>Sign in again</LinkButton>}
+        className="mb-5"
+      >
+        The change was not saved. Sign in, then make it once more.
+      </Strip>
+    );
+  }
+  return (
+    <Strip
+      kind="error"
+      heading="The change was not saved."
+      action={<Button onClick={onRetry}>Save again</Button>}
+      className="mb-5"
+    >
+      {trouble.message}
+    </Strip>
+  );
+}

@@ -1,0 +1,25 @@
+import { type CreationOptional, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
+import { filled, key, moment, text, uuid } from "./columns";
+import { connection } from "./connection";
+
+/** A person with an account. The e-mail address is kept in small letters. */
+export class User extends Model<InferAttributes<User>, InferCreationAttributes<User>> {
+  declare id: string;
+  declare email: string;
+  declare name: string;
+  declare passwordHash: string;
+  declare theme: CreationOptional<"light" | "dark" | "system">;
+  declare createdAt: CreationOptional<Date>;
+}
+
+User.init(
+  {
+    id: key(uuid()),
+    email: text(),
+    name: text(),
+    passwordHash: text(),
+    theme: filled(text()),
+    createdAt: filled(moment()),
+  },
+  { sequelize: connection, modelName: "User", tableName: "users" },
+);

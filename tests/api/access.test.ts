@@ -1,0 +1,194 @@
+import { beforeAll, describe, expect, it } from "vitest";
+import { acts } from "../../app/_server/access";
+import { ask, buildSession } from "../build";
+import { ACTORS, buildStage, cookieFor, type Actor, type Stage } from "./actors";
+import { findRoutes, type ServedRoute } from "./routes";
+
+/** Statuses in the order of ACTORS: owner, acoustician, client, builder, other owner, other client, nobody. */
+type Statuses = readonly [number, number, number, number, number, number, number];
+
+interface Row {
+  /** The act of the table of rights; null where no project is asked for. */
+  act: keyof typeof acts | null;
+  statuses: Statuses;
+  params?: (stage: Stage) => Record<string, string>;
+  body?: (stage: Stage) => unknown;
+  /** Ids nested below the project: each is asked again as a part of another project, which does not exist here. */
+  foreign?: (stage: Stage) => Record<string, string>;
+}
+
+const changing: Statuses = [200, 200, 403, 403, 404, 404, 401];
+const reading: Statuses = [200, 200, 200, 200, 404, 404, 401];
+const project = (stage: Stage) => ({ projectId: stage.project.id });
+const fence = ({ plan }: Stage) => {
+  const { id: _, ...values } = plan.fences[0]!;
+  return values;
+};
+
+const table: Record<string, Row> = {
+  "GET /api/health": { act: null, statuses: [200, 200, 200, 200, 200, 200, 200] },
+  "POST /api/csp": { act: null, statuses: [204, 204, 204, 204, 204, 204, 204], body: () => ({ "csp-report": {} }) },
+  "POST /api/session": {
+    act: null,
+    statuses: [401, 401, 401, 401, 401, 401, 401],
+    body: () => ({ email: "nobody@stillyard.example", password: "a password that nobody has" }),
+  },
+  "DELETE /api/session": { act: null, statuses: [204, 204, 204, 204, 204, 204, 204] },
+  "PATCH /api/me": { act: null, statuses: [204, 204, 204, 204, 204, 204, 401], body: () => ({ theme: "dark" }) },
+  "GET /api/projects/[projectId]": { act: "open project", statuses: reading, params: project },
+  "PATCH /api/projects/[projectId]": {
+    act: "rename project",
+    statuses: changing,
+    params: project,
+    body: () => ({ says: "Drums" }),
+  },
+  "GET /api/projects/[projectId]/verdict/[receiverId]": {
+    act: "open project",
+    statuses: reading,
+    params: (stage) => ({ ...project(stage), receiverId: stage.idOf("no9-bedroom") }),
+    foreign: ({ sibling }) => ({ receiverId: sibling.idOf("no9-bedroom") }),
+  },
+  "POST /api/projects/[projectId]/[part]": {
+    act: "edit plan",
+    statuses: changing,
+    params: (stage) => ({ ...project(stage), part: "fences" }),
+    body: fence,
+  },
+  "PATCH /api/projects/[projectId]/[part]/[partId]": {
+    act: "edit plan",
+    statuses: changing,
+    params: (stage) => ({ ...project(stage), part: "elements", partId: stage.idOf("yard-door") }),
+    body: () => ({ area: 1 + Math.random() }),
+    foreign: ({ sibling }) => ({ partId: sibling.idOf("yard-door") }),
+  },
+  "DELETE /api/projects/[projectId]/[part]/[partId]": {
+    act: "edit plan",
+    statuses: changing,
+    params: (stage) => ({ ...project(stage), part: "surfaces", partId: stage.plan.surfaces[0]!.id }),
+    foreign: ({ sibling }) => ({ partId: sibling.plan.surfaces[0]!.id }),
+  },
+};
+
+let stage: Stage;
+let routes: ServedRoute[];
+beforeAll(async () => {
+  stage = await buildStage();
+  routes = await findRoutes();
+});
+
+async function revision(): Promise<number> {
+  return (await stage.project.reload()).revision;
+}
+
+/** Asks as an actor. Whoever signs out does so in a session of their own. */
+async function askAs(actor: Actor, name: string, changes: { params?: Record<string, string>; headers?: Record<string, string> } = {}) {
+  const { method, handler } = routes.find((one) => one.name === name)!;
+  const { params, body } = table[name]!;
+  const leaves = name === "DELETE /api/session" && actor !== "nobody";
+  const cookie = leaves ? (await buildSession(stage.users[actor])).cookie : cookieFor(stage, actor);
+  return ask(handler, {
+    method,
+    cookie,
+    params: { ...params?.(stage), ...changes.params },
+    body: method === "GET" || method === "DELETE" ? undefined : body?.(stage),
+    revision: method === "GET" ? undefined : await revision(),
+    headers: changes.headers,
+  });
+}
+
+describe("rights", () => {
+  it("every route has a row and every row a route", () => {
+    expect(Object.keys(table).sort()).toEqual(routes.map(({ name }) => name).sort());
+  });
+
+  it("every act of the table of rights is asked by a route, or by a part of it", () => {
+    const asked = new Set(Object.values(table).map(({ act }) => act));
+    // "set limit" is the same route with the part `criteria`, asked below.
+    expect(Object.keys(acts).filter((act) => !asked.has(act as keyof typeof acts))).toEqual(["set limit"]);
+  });
+
+  const cells = Object.entries(table).flatMap(([name, { statuses }]) =>
+    ACTORS.map((actor, place) => ({ name, actor, status: statuses[place]! })),
+  );
+  // The owner comes last, so that what others must not remove is still there to be asked for.
+  const ordered = cells.toSorted((one, two) => ACTORS.indexOf(two.actor) - ACTORS.indexOf(one.actor));
+  it.each(ordered.filter(({ name, actor }) => !(name.startsWith("DELETE /api/projects") && actor === "acoustician")))(
+    "$name by $actor is $status",
+    async ({ name, actor, status }) => {
+      expect((await askAs(actor, name)).status).toBe(status);
+    },
+  );
+
+  it("an acoustician may remove a part", async () => {
+    const name = "DELETE /api/projects/[projectId]/[part]/[partId]";
+    expect((await askAs("acoustician", name, { params: { partId: stage.plan.surfaces[1]!.id } })).status).toBe(200);
+  });
+
+  it.each([["owner", 200], ["acoustician", 200], ["client", 403], ["builder", 403], ["other owner", 404], ["other client", 404], ["nobody", 401]] as const)(
+    "a limit changed by %s is %i",
+    async (actor, status) => {
+      const params = { part: "criteria", partId: stage.plan.criteria[0]!.id };
+      const { handler } = routes.find((one) => one.name === "PATCH /api/projects/[projectId]/[part]/[partId]")!;
+      const asked = { method: "PATCH", cookie: cookieFor(stage, actor), params: { projectId: stage.project.id, ...params }, body: { place: `in bed, asked by ${actor}` }, revision: await revision() };
+      expect((await ask(handler, asked)).status).toBe(status);
+    },
+  );
+
+  const nested = Object.entries(table).flatMap(([name, { foreign }]) => (foreign ? [{ name, foreign }] : []));
+  it.each(nested)("$name: the right child under a foreign parent does not exist", async ({ name, foreign }) => {
+    expect((await askAs("owner", name, { params: foreign(stage) })).status).toBe(404);
+  });
+
+  const onProjects = Object.keys(table).filter((name) => table[name]!.params);
+  it.each(onProjects)("%s: what one may not read answers like what was never there", async (name) => {
+    const strange = await askAs("other owner", name);
+    const absent = await askAs("owner", name, { params: { projectId: "00000000-0000-4000-8000-000000000000" } });
+    const [one, other] = await Promise.all([strange.json(), absent.json()]) as { error: { requestId?: string } }[];
+    delete one!.error.requestId;
+    delete other!.error.requestId;
+    expect(absent.status).toBe(404);
+    expect(one).toEqual(other);
+    expect([...strange.headers]).toEqual([...absent.headers]);
+  });
+
+  it.each(onProjects)("%s: an id that cannot be read is not looked for", async (name) => {
+    const rows = Object.keys(table[name]!.params!(stage)).filter((key) => key !== "part");
+    for (const key of rows) {
+      for (const id of ["1", "' or 1=1 --", "../..", "%00", "a".repeat(500), `${stage.project.id}x`]) {
+        expect((await askAs("owner", name, { params: { [key]: id } })).status, `${key} ${id}`).toBe(404);
+      }
+    }
+  });
+
+  it("a kind of part that is none is not there", async () => {
+    for (const part of ["element", "users", "constructor", "__proto__"]) {
+      const answer = await askAs("owner", "PATCH /api/projects/[projectId]/[part]/[partId]", { params: { part } });
+      expect(answer.status, part).toBe(404);
+    }
+  });
+
+  it("a right that is taken away is refused at the very next request", async () => {
+    const name = "GET /api/projects/[projectId]";
+    const { Participation } = await import("../../models/index");
+    expect((await askAs("client", name)).status).toBe(200);
+    await Participation.destroy({ where: { userId: stage.users.client.id, projectId: stage.project.id } });
+    expect((await askAs("client", name)).status).toBe(404);
+  });
+});
+
+describe("fields of the answers", () => {
+  it("a plan's answer has its three fields and no address of a person", async () => {
+    for (const actor of ["owner", "acoustician", "builder"] as const) {
+      const answer = await askAs(actor, "GET /api/projects/[projectId]");
+      const text = await answer.text();
+      expect(Object.keys(JSON.parse(text) as object).sort()).toEqual(["plan", "revision", "verdict"]);
+      expect(text).not.toContain("@stillyard.example");
+    }
+  });
+
+  it("a refusal names who may, without their addresses", async () => {
+    const text = await (await askAs("builder", "PATCH /api/projects/[projectId]")).text();
+    expect(text).toContain("Olga and Aron");
+    expect(text).not.toContain("@");
+  });
+});

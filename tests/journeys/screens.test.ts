@@ -1,0 +1,95 @@
+import { AxeBuilder } from "@axe-core/playwright";
+import type { Browser, BrowserContext, Page } from "playwright-core";
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { idOf } from "../../scripts/idOf";
+import { address, listenForComplaints, openBrowser, signIn } from "../browser";
+
+const project = `/projects/${idOf("project", "plumtree-row")}`;
+const screens = {
+  "the yards": "/projects",
+  "the budget": project,
+  "the budget of a dB(A) limit": `/projects/${idOf("project", "dell-end")}`,
+  "the budget without a listener": `/projects/${idOf("project", "tern-cottage")}`,
+  "the walls": `${project}/walls`,
+  "the yard door": `${project}/walls/${idOf("plumtree-row", "yard-door")}`,
+  "the roof": `${project}/walls/${idOf("plumtree-row", "roof")}`,
+};
+const widths = [320, 390, 1024, 1440];
+const themes = ["light", "dark"] as const;
+
+let browser: Browser;
+
+beforeAll(async () => {
+  browser = await openBrowser();
+});
+
+afterAll(() => browser.close());
+
+async function openContext(theme: "light" | "dark"): Promise<BrowserContext> {
+  return browser.newContext({ colorScheme: theme, reducedMotion: "reduce" });
+}
+
+/** Axe findings of any impact, each in one line. */
+async function findingsOf(page: Page): Promise<string[]> {
+  const { violations } = await new AxeBuilder({ page }).analyze();
+  return violations.flatMap(({ id, nodes }) => nodes.map(({ target, failureSummary }) => `${id} ${target.join(" ")}: ${failureSummary ?? ""}`));
+}
+
+const sidewaysScroll = (page: Page) => page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
+
+async function expectSound(page: Page, path: string): Promise<void> {
+  for (const width of widths) {
+    await page.setViewportSize({ width, height: 900 });
+    await page.goto(address + path, { waitUntil: "load" });
+    await page.waitForTimeout(200);
+    expect(await findingsOf(page), `${path} at ${width}`).toEqual([]);
+    expect(await sidewaysScroll(page), `${path} scrolls sideways at ${width}`).toBeLessThanOrEqual(0);
+  }
+}
+
+describe.each(themes)("every screen in the %s theme", (theme) => {
+  let context: BrowserContext;
+  let page: Page;
+  let complaints: string[];
+
+  beforeAll(async () => {
+    context = await openContext(theme);
+    page = await context.newPage();
+    complaints = listenForComplaints(page);
+    await expectSound(page, "/sign-in");
+    await signIn(page, "ines");
+  });
+
+  afterAll(() => context.close());
+
+  it.each(Object.entries(screens))("%s has no axe finding and no sideways scroll at any width", async (_, path) => {
+    await expectSound(page, path);
+    expect(complaints).toEqual([]);
+  });
+});
+
+describe("what each role finds", () => {
+  it.each(["ines", "tobi"])("%s may choose another door", async (person) => {
+    const page = await (await openContext("light")).newPage();
+    await signIn(page, person);
+    await page.goto(address + screens["the yard door"]);
+    expect(await page.getByRole("radio").count()).toBeGreaterThan(3);
+    await page.context().close();
+  });
+
+  it.each(["anouk", "maro"])("%s reads the door and the reason why it cannot be changed here", async (person) => {
+    const page = await (await openContext("light")).newPage();
+    await signIn(page, person);
+    await page.goto(address + screens["the yard door"]);
+    expect(await page.getByRole("radio").count()).toBe(0);
+    expect(await page.locator("main").innerText()).toMatch(/Only .*Ines.* can change/);
+    await page.context().close();
+  });
+
+  it("nobody is led to the sign-in page and back", async () => {
+    const page = await (await openContext("light")).newPage();
+    await page.goto(address + screens["the roof"]);
+    expect(new URL(page.url()).pathname).toBe("/sign-in");
+    await page.context().close();
+  });
+});

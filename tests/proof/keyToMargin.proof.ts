@@ -1,0 +1,56 @@
+import type { Browser, Page } from "playwright-core";
+import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { idOf } from "../../scripts/idOf";
+import { address, openBrowser, signIn } from "../browser";
+
+const door = `/projects/${idOf("project", "plumtree-row")}/walls/${idOf("plumtree-row", "yard-door")}`;
+const EDITS = 50;
+const APART = 600;
+
+let browser: Browser;
+let page: Page;
+
+beforeAll(async () => {
+  browser = await openBrowser();
+  page = await browser.newPage({ viewport: { width: 1440, height: 900 } });
+  await signIn(page, "ines");
+  await page.goto(address + door, { waitUntil: "networkidle" });
+});
+
+afterAll(() => browser.close());
+
+/** Marks the wanted door, then measures from the key press to the frame that shows the new words of the verdict. */
+async function putIn(name: RegExp): Promise<number> {
+  const radio = page.getByRole("radio", { name });
+  await radio.focus();
+  await page.keyboard.press("Space");
+  await page.waitForTimeout(APART);
+  const shown = page.evaluate(
+    () =>
+      new Promise<number>((resolve) => {
+        const strip = document.querySelector("#verdict [role=status]")!;
+        const before = strip.textContent;
+        let pressed = 0;
+        document.addEventListener("keydown", () => (pressed = performance.now()), { capture: true, once: true });
+        const look = () => {
+          const words = strip.textContent ?? "";
+          if (pressed && words !== before && !words.includes("Weighing")) resolve(performance.now() - pressed);
+          else requestAnimationFrame(look);
+        };
+        requestAnimationFrame(look);
+      }),
+  );
+  await page.keyboard.press("Enter");
+  return shown;
+}
+
+const rank = (times: number[], share: number) => [...times].sort((a, b) => a - b)[Math.ceil(times.length * share) - 1]!;
+
+describe("a changed door", () => {
+  it("shows the new margin within 200 ms of the key press for 95 of 100 edits", async () => {
+    const times: number[] = [];
+    for (let edit = 0; edit < EDITS; edit += 1) times.push(await putIn(edit % 2 === 0 ? /^Heavy door/i : /^Hardwood door/i));
+    console.log(`key press to new margin, ${EDITS} edits: p50 ${rank(times, 0.5).toFixed(0)} ms, p95 ${rank(times, 0.95).toFixed(0)} ms, most ${Math.max(...times).toFixed(0)} ms`);
+    expect(rank(times, 0.95)).toBeLessThan(200);
+  });
+});
