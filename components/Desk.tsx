@@ -1,7 +1,7 @@
 "use client";
 
 import clsx from "clsx";
-import { useAtomValue, useSetAtom } from "jotai";
+import { useAtomValue } from "jotai";
 import { useEffect, useRef, useState } from "react";
 import { elementAddress } from "./addresses";
 import { answerAtom, type Answer } from "./state/plan";
@@ -101,12 +101,10 @@ function Panels({ projectId, lit }: { projectId: string; lit: Lit }) {
   );
 }
 
-function Budget({ projectId, answer, mayEdit }: Props) {
+function Budget({ projectId, mayEdit }: Omit<Props, "answer">) {
   const lit = useLit();
-  const setAnswer = useSetAtom(answerAtom);
   const [open, setOpen] = useState(false);
   const asked = useRef(false);
-  useEffect(() => setAnswer(answer), [answer, setAnswer]);
   useEffect(() => {
     if (open && asked.current) focusOn(`${DOUBTS}-head`);
   }, [open]);
@@ -128,7 +126,7 @@ function Budget({ projectId, answer, mayEdit }: Props) {
 export function Desk({ projectId, answer, mayEdit }: Props) {
   return (
     <PlanProvider key={projectId} answer={answer}>
-      <Budget projectId={projectId} answer={answer} mayEdit={mayEdit} />
+      <Budget projectId={projectId} mayEdit={mayEdit} />
     </PlanProvider>
   );
 }

@@ -1,4 +1,5 @@
 import type { ReactNode } from "react";
+import { KeepFresh } from "../state/KeepFresh";
 import { budgetAddress, projectsAddress, wallsAddress } from "../addresses";
 import { Beam } from "./Beam";
 import { Header } from "./Header";
@@ -12,6 +13,8 @@ interface Props {
   project: { id: string; name: string; stage: string };
   user: { name: string; email: string; theme: "light" | "dark" | "system" };
   stage: YardStage;
+  /** Of the plan the page shows. */
+  revision: number;
   /** Where the skip link leads; the verdict if nothing is said. */
   skipTo?: string;
   skipWords?: string;
@@ -26,7 +29,7 @@ function stagesOf(projectId: string, current: YardStage): Stage[] {
 }
 
 /** Head, beam and page of every stage of a yard. */
-export function YardFrame({ project, user, stage, skipTo, skipWords, children }: Props) {
+export function YardFrame({ project, user, stage, revision, skipTo, skipWords, children }: Props) {
   const stages = stagesOf(project.id, stage);
   return (
     <>
@@ -42,6 +45,7 @@ export function YardFrame({ project, user, stage, skipTo, skipWords, children }:
       </Header>
       <Page bar>{children}</Page>
       <PhoneBar stages={stages} />
+      <KeepFresh revision={revision} />
     </>
   );
 }

@@ -17,8 +17,8 @@ export type SignInOutcome =
 const UNREACHABLE = "Your e-mail and password are still in the fields. Try again in a few seconds.";
 
 async function readAnswer(answer: Response): Promise<{ next?: unknown; message?: unknown }> {
-  const body: unknown = await answer.json().catch(() => ({}));
-  return typeof body === "object" && body !== null ? body : {};
+  const body: { next?: unknown; error?: { message?: unknown } } | null = await answer.json().catch(() => null);
+  return { next: body?.next, message: body?.error?.message };
 }
 
 const words = (message: unknown, otherwise: string): string =>

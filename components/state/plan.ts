@@ -1,4 +1,4 @@
-import { atom, createStore } from "jotai";
+import { atom } from "jotai";
 import type { Plan } from "@/lib/noise/plan";
 import type { Verdict } from "@/lib/noise/verdict";
 
@@ -24,6 +24,9 @@ export const answerAtom = atom(
   },
 );
 
+/** Greatest revision seen on this yard's pages; 0 before the first. */
+export const revisionAtom = atom((get) => get(heldAnswer)?.revision ?? 0);
+
 /** What the reader looks at: a listener, a band in Hz, a path; null is whatever leads. */
 export const litReceiverAtom = atom<string | null>(null);
 export const litBandAtom = atom<number | null>(null);
@@ -31,10 +34,3 @@ export const litPathAtom = atom<string | null>(null);
 
 /** Whether a change is on its way. */
 export const savingAtom = atom(false);
-
-/** A store for one yard's page, with the answer it came with. None is shared between requests. */
-export function createPlanStore(answer: Answer) {
-  const store = createStore();
-  store.set(answerAtom, answer);
-  return store;
-}

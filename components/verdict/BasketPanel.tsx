@@ -5,7 +5,7 @@ import type { PathVerdict } from "@/lib/noise/verdict";
 import { elementAddress } from "../addresses";
 import { bandWords } from "../format";
 import type { WidthClass } from "../ui/widthClass";
-import { useDrawnWidth } from "../walls/useDrawnWidth";
+import { useDrawnWidth } from "../ui/useDrawnWidth";
 import { Basket, SpentWords } from "./Basket";
 import type { Column } from "./columns";
 import { openableId } from "./lever";

@@ -3,7 +3,7 @@
 import type { KeyboardEvent } from "react";
 import { percent, wholeDecibels } from "../format";
 import { useWidthClass } from "../ui/useWidthClass";
-import { useDrawnWidth } from "../walls/useDrawnWidth";
+import { useDrawnWidth } from "../ui/useDrawnWidth";
 import { promisedWidths } from "./axis";
 import { columnSentence, inSentence } from "./chartWords";
 import { countedWithout, isNumber, shareOf, weightedUnit, type Column } from "./columns";

@@ -3,7 +3,7 @@
 import type { ReactNode } from "react";
 import { useWidthClass } from "../ui/useWidthClass";
 import type { WidthClass } from "../ui/widthClass";
-import { useDrawnWidth } from "../walls/useDrawnWidth";
+import { useDrawnWidth } from "../ui/useDrawnWidth";
 import { columnsOf, litColumnOf, type Column } from "./columns";
 import { CrossCutDrawing } from "./CrossCutDrawing";
 import type { Reading } from "./reading";

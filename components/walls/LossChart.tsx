@@ -5,7 +5,7 @@ import type { Out } from "../../lib/noise/verdict";
 import { bandWords, wholeDecibels } from "../format";
 import { axisOf, drawDoubt, drawLine, lossScales, pointsOf, type LossPoint } from "./lossGeometry";
 import { EndNames, Grid, LitColumn, LitFigure, Swing } from "./LossMarks";
-import { useDrawnWidth } from "./useDrawnWidth";
+import { useDrawnWidth } from "../ui/useDrawnWidth";
 
 interface Props {
   /** Of the element as it stands: "this wall". */

@@ -6,7 +6,7 @@ import { Balloons, DimensionChain, ScaleBar, WholeDimension } from "./SectionMea
 import { barLength, placeBalloons, placeLayers, wholeThickness, breakOver } from "./sectionGeometry";
 import { BreakLine, SectionLayer } from "./SectionLayers";
 import { toMillimetres } from "./units";
-import { useDrawnWidth } from "./useDrawnWidth";
+import { useDrawnWidth } from "../ui/useDrawnWidth";
 
 interface Props {
   sheet: ConstructionSheet;

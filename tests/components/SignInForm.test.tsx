@@ -52,7 +52,7 @@ describe("signing in", () => {
   );
 
   it("keeps the e-mail, empties the password and says why beside it", async () => {
-    answerWith(401, { message: "E-mail and password do not fit together." });
+    answerWith(401, { error: { message: "E-mail and password do not fit together." } });
     const { leave, email, password, press } = await fill();
     await press();
     expect(email.value).toBe("ines@yard.example");
@@ -65,7 +65,7 @@ describe("signing in", () => {
   });
 
   it("says how long to wait and keeps both fields", async () => {
-    answerWith(429, { message: "The next try in 11 seconds." });
+    answerWith(429, { error: { message: "The next try in 11 seconds." } });
     const { password, press } = await fill();
     await press();
     expect(screen.getByRole("status").textContent).toContain("The next try in 11 seconds.");

@@ -3,6 +3,7 @@ import { userEvent } from "@testing-library/user-event";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import { elementAddress } from "@/components/addresses";
 import { Desk } from "@/components/Desk";
+import { YardState } from "@/components/state/PlanProvider";
 import { WidthClassProvider } from "@/components/ui/useWidthClass";
 import { plumtreeAnswer } from "./fixtures/answers";
 import { buildVerdict } from "./fixtures/demoVerdict";
@@ -22,7 +23,9 @@ afterEach(() => {
 function open(answer = plumtreeAnswer, mayEdit = true) {
   return render(
     <WidthClassProvider initial={1440}>
-      <Desk projectId="yard" answer={answer} mayEdit={mayEdit} />
+      <YardState>
+        <Desk projectId="yard" answer={answer} mayEdit={mayEdit} />
+      </YardState>
     </WidthClassProvider>,
   );
 }
@@ -124,7 +127,9 @@ describe("the desk", () => {
     const again = (revision: number, verdict = plumtreeAnswer.verdict) =>
       rerender(
         <WidthClassProvider initial={1440}>
-          <Desk projectId="yard" answer={{ ...plumtreeAnswer, revision, verdict }} mayEdit />
+          <YardState>
+            <Desk projectId="yard" answer={{ ...plumtreeAnswer, revision, verdict }} mayEdit />
+          </YardState>
         </WidthClassProvider>,
       );
     again(4, buildVerdict([]));

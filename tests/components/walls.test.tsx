@@ -2,6 +2,7 @@ import { cleanup, render, screen, waitFor, within } from "@testing-library/react
 import userEvent from "@testing-library/user-event";
 import { afterEach, beforeEach, describe, expect, it, vi } from "vitest";
 import type { Answer } from "@/components/state/plan";
+import { YardState } from "@/components/state/PlanProvider";
 import { WallDesk } from "@/components/walls/WallDesk";
 import { buildAnswer, demoPlan, libraryFor, planWith } from "./fixtures/wallsAnswer";
 
@@ -16,13 +17,15 @@ const HEAVY = "door-mdf-3x18-damped";
 
 function show(elementId: string, { answer = buildAnswer(), may = { edit: true, reason: "" } } = {}) {
   render(
-    <WallDesk
-      projectId="p1"
-      elementId={elementId}
-      answer={answer}
-      library={libraryFor(elementId)}
-      may={may}
-    />,
+    <YardState>
+      <WallDesk
+        projectId="p1"
+        elementId={elementId}
+        answer={answer}
+        library={libraryFor(elementId)}
+        may={may}
+      />
+    </YardState>,
   );
   return userEvent.setup();
 }

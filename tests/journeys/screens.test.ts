@@ -12,7 +12,7 @@ const screens = {
   "the budget without a listener": `/projects/${idOf("project", "tern-cottage")}`,
   "the walls": `${project}/walls`,
   "the yard door": `${project}/walls/${idOf("plumtree-row", "yard-door")}`,
-  "the roof": `${project}/walls/${idOf("plumtree-row", "roof")}`,
+  "the roof": `${project}/walls/${idOf("plumtree-row", "studio-roof")}`,
 };
 const widths = [320, 390, 1024, 1440];
 const themes = ["light", "dark"] as const;

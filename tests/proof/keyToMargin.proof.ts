@@ -49,7 +49,9 @@ const rank = (times: number[], share: number) => [...times].sort((a, b) => a - b
 describe("a changed door", () => {
   it("shows the new margin within 200 ms of the key press for 95 of 100 edits", async () => {
     const times: number[] = [];
-    for (let edit = 0; edit < EDITS; edit += 1) times.push(await putIn(edit % 2 === 0 ? /^Heavy door/i : /^Hardwood door/i));
+    const standing = await page.getByRole("radio", { checked: true }).getAttribute("aria-label");
+    const doors = /^Heavy/.test(standing ?? "") ? [/^Hardwood door/, /^Heavy door/] : [/^Heavy door/, /^Hardwood door/];
+    for (let edit = 0; edit < EDITS; edit += 1) times.push(await putIn(doors[edit % 2]!));
     console.log(`key press to new margin, ${EDITS} edits: p50 ${rank(times, 0.5).toFixed(0)} ms, p95 ${rank(times, 0.95).toFixed(0)} ms, most ${Math.max(...times).toFixed(0)} ms`);
     expect(rank(times, 0.95)).toBeLessThan(200);
   });

@@ -11,7 +11,7 @@ export default async function BudgetPage({ params }: { params: Promise<{ project
   const { projectId } = await params;
   const { user, project, may, answer } = await openProjectPage(projectId, signInAddress(budgetAddress(projectId)));
   return (
-    <YardFrame project={project} user={user} stage="budget">
+    <YardFrame project={project} user={user} stage="budget" revision={answer.revision}>
       <Desk projectId={projectId} answer={answer} mayEdit={may.edit} />
     </YardFrame>
   );

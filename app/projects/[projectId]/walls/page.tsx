@@ -17,7 +17,7 @@ export default async function WallsPage({ params }: { params: Promise<{ projectI
   const sheets = answer.plan.constructions.map((construction) => sheetOf(construction));
   const lead = leadOf(answer);
   return (
-    <YardFrame project={project} user={user} stage="walls">
+    <YardFrame project={project} user={user} stage="walls" revision={answer.revision}>
       <VerdictStrip answer={answer} projectId={projectId} budgetHref={budgetAddress(projectId)} />
       <h1 className="mb-4 text-verdictPhone leading-[1.12] mid:mb-5 desk:text-verdict">
         Walls &amp; openings

@@ -25,7 +25,7 @@ export default async function ElementPage({ params }: Props) {
   if (!element) notFound();
   const library = { own: ownSheets(answer.plan, element), catalogue: catalogueSheets(element) };
   return (
-    <YardFrame project={project} user={user} stage="walls">
+    <YardFrame project={project} user={user} stage="walls" revision={answer.revision}>
       <WallDesk projectId={projectId} elementId={elementId} answer={answer} library={library} may={may} />
     </YardFrame>
   );
