@@ -25,6 +25,8 @@ interface Props {
   answer: Answer;
   /** Whoever may not change the walls is led to look at them. */
   mayEdit: boolean;
+  /** An acoustician begins with the doubts. */
+  doubtsFirst?: boolean;
 }
 
 function useListeners(): Listener[] {
@@ -42,7 +44,7 @@ function focusOn(id: string) {
 }
 
 /** The first lever of the verdict, and the way to its doubts. */
-function SlabActions({ projectId, lit, mayEdit, open, onDoubts }: Omit<Props, "answer"> & { lit: Lit; open: boolean; onDoubts: () => void }) {
+function SlabActions({ projectId, lit, mayEdit, open, onDoubts }: Omit<Props, "answer" | "doubtsFirst"> & { lit: Lit; open: boolean; onDoubts: () => void }) {
   const { reading, columns } = lit;
   if (!reading) return null;
   const leading = columns.find(({ band, index }) => (reading.weighed.weighted ? index === null : band === reading.weighed.band));
@@ -101,9 +103,9 @@ function Panels({ projectId, lit }: { projectId: string; lit: Lit }) {
   );
 }
 
-function Budget({ projectId, mayEdit }: Omit<Props, "answer">) {
+function Budget({ projectId, mayEdit, doubtsFirst = false }: Omit<Props, "answer">) {
   const lit = useLit();
-  const [open, setOpen] = useState(false);
+  const [open, setOpen] = useState(doubtsFirst);
   const asked = useRef(false);
   useEffect(() => {
     if (open && asked.current) focusOn(`${DOUBTS}-head`);
@@ -123,10 +125,10 @@ function Budget({ projectId, mayEdit }: Omit<Props, "answer">) {
 }
 
 /** The budget of one yard: the sentence, who listens, what each band has left, and by which way it gets there. */
-export function Desk({ projectId, answer, mayEdit }: Props) {
+export function Desk({ projectId, answer, ...reader }: Props) {
   return (
     <PlanProvider key={projectId} answer={answer}>
-      <Budget projectId={projectId} mayEdit={mayEdit} />
+      <Budget projectId={projectId} {...reader} />
     </PlanProvider>
   );
 }

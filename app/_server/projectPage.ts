@@ -3,7 +3,7 @@ import { cookies } from "next/headers";
 import { notFound, redirect } from "next/navigation";
 import { cache } from "react";
 import type { Project } from "@/models";
-import { rightOf } from "./access";
+import { rightOf, type Role } from "./access";
 import { cookieName } from "./cookies";
 import { Refusal } from "./errors";
 import { identify, type Reader } from "./identity";
@@ -26,6 +26,8 @@ export interface OpenedPage {
   project: ProjectFacts;
   people: Person[];
   may: { edit: boolean; reason: string };
+  /** Every role the reader has here. */
+  roles: readonly Role[];
   answer: Answer;
 }
 
@@ -64,6 +66,7 @@ async function pageOf(reader: Reader, projectId: string): Promise<OpenedPage> {
     user: { name: reader.name, email: reader.email, theme: reader.theme },
     project: facts(opened.project),
     people,
+    roles: opened.roles,
     may: { edit, reason: edit ? "" : opened.project.archivedAt ? "This yard is archived." : reason },
     answer: answerOf(opened.project, stored),
   };

@@ -90,7 +90,7 @@ export function SignInForm({ next, notice, onSignedIn = (path) => window.locatio
       <Checkbox
         name="keep"
         label="Keep me signed in on this device"
-        hint="For 7 days."
+        hint="For up to 7 days; an owner or acoustician signs in again each day."
         checked={keep}
         onChange={(event) => setKeep(event.target.checked)}
       />

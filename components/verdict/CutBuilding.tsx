@@ -9,6 +9,21 @@ function drawOutline({ outline }: Building, { x, y }: CutScale): string {
   return points.length === 0 ? "" : `M${points.join("L")}${standing ? "" : "Z"}`;
 }
 
+/** Metres that a pitched roof is drawn beyond its walls. */
+const OVERHANG = 0.35;
+
+/** The feet of a pitched roof, carried past the walls on its own slope. */
+function Eaves({ outline, scale: { x, y } }: { outline: Building["outline"]; scale: CutScale }) {
+  return outline.map(([along, height], index) =>
+    [outline[index - 1], outline[index + 1]].map((next) => {
+      if (!next || next[1] <= height || Math.abs(next[0] - along) < 0.3 || height < 0.3) return null;
+      const beyond = along + Math.sign(along - next[0]) * OVERHANG;
+      const foot = height - ((next[1] - height) / Math.abs(next[0] - along)) * OVERHANG;
+      return <path key={`${index} ${next[0]}`} d={`M${x(along)} ${y(height)}L${x(beyond)} ${y(foot)}`} strokeWidth="2.6" strokeLinecap="round" className="stroke-slabink" />;
+    }),
+  );
+}
+
 function Rooms({ rooms, scale: { x, y } }: { rooms: Building["rooms"]; scale: CutScale }) {
   return rooms.map(({ id, from, to, floor, ceiling }) => (
     <rect key={id} x={x(from)} y={y(ceiling)} width={x(to) - x(from)} height={y(floor) - y(ceiling)} fill="none" strokeWidth="1" className="stroke-slabink2" />
@@ -48,6 +63,7 @@ export function CutBuilding({ building, litId, scale }: { building: Building; li
   return (
     <g>
       <path d={drawOutline(building, scale)} fill="none" strokeWidth="2.6" strokeLinejoin="round" className="stroke-slabink" />
+      <Eaves outline={building.outline} scale={scale} />
       {building.floors
         .filter(({ height }) => height > 0.3)
         .map(({ from, to, height }) => (

@@ -125,7 +125,7 @@ describe("people and projects", () => {
   test("every file of the folder belongs to one of them", () => {
     const folder = readdirSync(new URL("../../data/examples", import.meta.url));
     expect(folder.sort()).toEqual(
-      ["people.json", "projects.json", ...projects.map(({ plan }) => plan)].sort(),
+      ["lot-7.case.json", "people.json", "projects.json", ...projects.map(({ plan }) => plan)].sort(),
     );
   });
 

@@ -9,10 +9,10 @@ export const metadata: Metadata = { title: "Budget" };
 
 export default async function BudgetPage({ params }: { params: Promise<{ projectId: string }> }) {
   const { projectId } = await params;
-  const { user, project, may, answer } = await openProjectPage(projectId, signInAddress(budgetAddress(projectId)));
+  const { user, project, may, roles, answer } = await openProjectPage(projectId, signInAddress(budgetAddress(projectId)));
   return (
     <YardFrame project={project} user={user} stage="budget" revision={answer.revision}>
-      <Desk projectId={projectId} answer={answer} mayEdit={may.edit} />
+      <Desk projectId={projectId} answer={answer} mayEdit={may.edit} doubtsFirst={roles.includes("acoustician")} />
     </YardFrame>
   );
 }
