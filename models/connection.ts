@@ -24,6 +24,8 @@ function connect(): Sequelize {
       application_name: "stillyard",
       connectionTimeoutMillis: 3_000,
       keepAlive: true,
+      // Ours, should the server's own limit below not arrive: a line that swallows what is sent says nothing.
+      query_timeout: 6_000,
       statement_timeout: 5_000,
       lock_timeout: 3_000,
       idle_in_transaction_session_timeout: 10_000,

@@ -12,6 +12,7 @@ const forbidden = /^(x-forwarded-.*|forwarded|x-real-ip|x-stillyard-address|x-mi
 
 const words = {
   400: "This request could not be read.",
+  405: "This cannot be asked here.",
   408: "This request took too long to arrive.",
   414: "This address is too long.",
   431: "The headers of this request are too long.",
@@ -19,16 +20,24 @@ const words = {
   503: "The answer took too long. Nothing was lost that was confirmed; try again.",
 };
 
+/** What an answer carries where whoever wrote it said nothing of its own: a redirect or a fault of the framework. */
+const otherwise = { "Content-Security-Policy": sealedPolicy, "Cache-Control": "private, no-store" };
+
+const methods = new Set(["GET", "HEAD", "POST", "PUT", "PATCH", "DELETE", "OPTIONS"]);
+
 /**
  * Opens the product's http server around a handler: sizes, times, the client's address, an orderly end.
  * `trustedHop` is the address of a forwarding server whose last word on the client's address is believed.
+ * Only a server under development has use for `upgrades`, sockets that become channels of their own.
  */
-export async function openServer({ handler, port, host, origin, trustedHop, answerWithin = 30_000 }) {
+export async function openServer({ handler, port, host, origin, trustedHop, answerWithin = 30_000, upgrades = false }) {
   const always = { ...securityHeaders, ...(isTrustworthy(origin) ? { "Strict-Transport-Security": strictTransport } : {}) };
   const limits = { maxHeaderSize: 16_384, headersTimeout: 10_000, requestTimeout: 30_000, connectionsCheckingInterval: 1_000 };
   const server = createServer({ ...limits, keepAliveTimeout: 5_000 }, async (request, response) => {
     for (const [name, value] of Object.entries(always)) response.setHeader(name, value);
-    if (request.url.length > longestAddress) return refuse(response, 414);
+    fillIn(response);
+    const refused = refusalOf(request);
+    if (refused) return refuse(response, refused);
     nameTheClient(request, trustedHop);
     const late = setTimeout(() => response.headersSent || refuse(response, 503), answerWithin);
     response.once("close", () => clearTimeout(late));
@@ -41,6 +50,7 @@ export async function openServer({ handler, port, host, origin, trustedHop, answ
   });
   server.on("clientError", (fault, socket) => refuseRaw(socket, statusOf(fault), always));
   const drain = prepareDrain(server);
+  server.on("upgrade", (_request, socket) => (upgrades ? endWithDrain(server, socket) : refuseRaw(socket, 400, always)));
   await listen(server, port, host);
   return { port: server.address().port, drain };
 }
@@ -54,6 +64,31 @@ function listen(server, port, host) {
 
 export function portTaken(port) {
   return new Sentence(`Port ${port} is taken by another program: free it, or choose another with PORT=3001 npm start.`);
+}
+
+/** Adds at the last moment what an answer must not be without. */
+function fillIn(response) {
+  const { writeHead } = response;
+  response.writeHead = (...head) => {
+    for (const [name, value] of Object.entries(otherwise)) if (!response.hasHeader(name)) response.setHeader(name, value);
+    return writeHead.apply(response, head);
+  };
+}
+
+/** The status of a request that nobody behind us has to read, or undefined. */
+function refusalOf({ method, url }) {
+  if (url.length > longestAddress) return 414;
+  if (!methods.has(method)) return 405;
+  // A path of our own, whole: a server's name before it would come back in redirects.
+  return url.startsWith("/") && isReadable(url) ? undefined : 400;
+}
+
+function isReadable(url) {
+  try {
+    return decodeURIComponent(url.split("?")[0]) !== "";
+  } catch {
+    return false;
+  }
 }
 
 /** Removes all that a client says about its own address and writes down what the socket says. */
@@ -73,7 +108,7 @@ function pairs(flat) {
 
 function refuse(response, status) {
   if (response.headersSent) return response.destroy();
-  response.writeHead(status, { "Content-Type": "text/plain; charset=utf-8", "Content-Security-Policy": sealedPolicy, "Cache-Control": "no-store", Connection: "close" });
+  response.writeHead(status, { "Content-Type": "text/plain; charset=utf-8", ...otherwise, Connection: "close" });
   response.end(`${words[status]}\n`);
 }
 
@@ -83,13 +118,14 @@ function refuseRaw(socket, status, always) {
   const body = `${words[status]}\n`;
   const headers = {
     ...always,
-    "Content-Security-Policy": sealedPolicy,
-    "Cache-Control": "no-store",
+    ...otherwise,
     "Content-Type": "text/plain; charset=utf-8",
     "Content-Length": Buffer.byteLength(body),
     Connection: "close",
   };
   const lines = Object.entries(headers).map(([name, value]) => `${name}: ${value}\r\n`);
+  // The other side may never close its half.
+  setTimeout(() => socket.destroy(), 1_000).unref();
   socket.end(`HTTP/1.1 ${status} ${STATUS_CODES[status]}\r\n${lines.join("")}\r\n${body}`);
 }
 
@@ -98,12 +134,15 @@ function statusOf({ code }) {
   return code === "ERR_HTTP_REQUEST_TIMEOUT" ? 408 : 400;
 }
 
+/** A socket that became a channel of its own would keep the server open for ever. */
+function endWithDrain(server, socket) {
+  server.once("drain-begins", () => socket.destroy());
+}
+
 /** Ends without cutting answers: no new connections, open requests have their time, then all is closed. */
 function prepareDrain(server) {
   const sockets = new Set();
   server.on("connection", (socket) => sockets.add(socket.once("close", () => sockets.delete(socket))));
-  // A socket that became a channel of its own would keep the server open for ever.
-  server.on("upgrade", (_request, socket) => server.once("drain-begins", () => socket.destroy()));
   let draining = false;
   server.on("request", (_request, response) => {
     response.once("finish", () => draining && setImmediate(() => server.closeIdleConnections()));
@@ -139,6 +178,7 @@ export async function serveProduct({ developing = false, ready } = {}) {
     trustedHop: process.env.STILLYARD_TRUSTED_HOP,
     // A page may have to be compiled first.
     answerWithin: developing ? 180_000 : undefined,
+    upgrades: developing,
   });
   return { stop: async () => (await server.drain(), await app.close()) };
 }

@@ -125,6 +125,11 @@ describe("imports go down or stay on their floor", () => {
   });
   test("models know neither pages nor components", () =>
     expect(breaches("models", into("app", "components", "tests", "scripts"))).toEqual([]));
+  test("a model imports no other model: associations stand together in the index", () => {
+    const isModel = (name: string) => /^models\/[A-Z]\w*\.ts$/.test(name);
+    expect(inRoom("models").filter(({ name }) => isModel(name)).length).toBeGreaterThan(10);
+    expect(breaches("models", ({ to }, { name }) => isModel(name) && isModel(to))).toEqual([]);
+  });
   test("components know neither models nor pages", () =>
     expect(breaches("components", into("models", "app", "tests", "scripts", "data"))).toEqual([]));
   test("components take values of bands.ts alone from lib/noise", () => {

@@ -2,6 +2,7 @@ import "server-only";
 import { randomUUID } from "node:crypto";
 import { readSeal, setCookie } from "./cookies";
 import { answerError, Refusal } from "./errors";
+import { log } from "./log";
 import { identify, renewSession, type Reader } from "./identity";
 
 /** Answers a request, or says in words why not; every answer is for its asker alone. */
@@ -28,9 +29,13 @@ export async function requireReader(request: Request): Promise<Reader> {
   return reader;
 }
 
-/** The answer with a new session id, where the old one has had its day. */
+/** The answer with a new session id, where the old one has had its day. What was done is answered even if that fails. */
 export async function renewed(response: Response, reader: Reader): Promise<Response> {
-  const seal = reader.session.toRenew ? await renewSession(reader) : undefined;
+  const seal = reader.session.toRenew ? await renewSession(reader).catch(tell) : undefined;
   if (seal) response.headers.append("Set-Cookie", setCookie(seal, reader.session.keep));
   return response;
+}
+
+function tell(thrown: unknown): undefined {
+  log.warn({ err: thrown }, "a session keeps its old id");
 }

@@ -2,6 +2,7 @@ import "server-only";
 import { fn, type Transaction } from "sequelize";
 import { z } from "zod";
 import type { Act, Project } from "@/models";
+import { archivedRefusal } from "./projects";
 import { read } from "./sessionRoutes";
 
 const facts = z.strictObject({
@@ -19,6 +20,7 @@ interface Given {
 /** Renames, archives or restores a yard. */
 export async function changeProject({ project, body, transaction }: Given): Promise<Act[]> {
   const { archived, ...words } = read(facts, body);
+  if (project.archivedAt && archived !== false) throw archivedRefusal();
   const before = factsOf(project);
   const values = { ...words, ...(archived !== undefined && archived !== before.archived && { archivedAt: archived ? now() : null }) };
   await project.update(values, { fields: ["name", "says", "archivedAt"], transaction });

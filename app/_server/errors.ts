@@ -1,4 +1,5 @@
 import "server-only";
+import { randomUUID } from "node:crypto";
 import { PartFault } from "@/models/parts";
 import { log } from "./log";
 
@@ -55,6 +56,14 @@ export function answerError(thrown: unknown, requestId: string): Response {
   return errorAnswer(status, error, details);
 }
 
+/** What a page throws on: the framework writes down all that it catches, so a fault goes there with a number only. */
+export function pageFault(thrown: unknown): Error {
+  if (thrown instanceof Refusal) return thrown;
+  const requestId = randomUUID();
+  log.error({ requestId, err: thrown }, "fault of a page");
+  return new Error(`Fault ${requestId}`);
+}
+
 function errorAnswer(status: number, error: object, { retryAfter, more }: Details = {}): Response {
   const headers = { "Cache-Control": "private, no-store", ...(retryAfter && { "Retry-After": String(retryAfter) }) };
   return Response.json({ error, ...more }, { status, headers });
@@ -98,5 +107,5 @@ function databaseRefusal(thrown: unknown): Refusal | undefined {
 
 function isConnectionFault(thrown: unknown): boolean {
   if (!(thrown instanceof Error)) return false;
-  return /^Sequelize(Connection|HostNot)/.test(thrown.name) || /Connection terminated|connection timeout/i.test(thrown.message);
+  return /^Sequelize(Connection|HostNot)/.test(thrown.name) || /Connection terminated|connection timeout|query read timeout/i.test(thrown.message);
 }

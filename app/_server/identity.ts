@@ -4,7 +4,7 @@ import { fn, Op } from "sequelize";
 import { Membership, Session, User } from "@/models";
 import { sealId, unsealId } from "./cookies";
 import { isAlive, isToMark, isToRenew } from "./lifetimes";
-import { matchesPassword } from "./passwords";
+import { hashPassword, isCheaper, matchesPassword } from "./passwords";
 import { inTransaction } from "./transactions";
 
 /** Who asks. */
@@ -63,31 +63,39 @@ export async function signIn({ email, password, keep, device }: Credentials, old
   const user = await User.findOne({ where: { email: email.trim().toLowerCase() } });
   const fits = await matchesPassword(password, user?.passwordHash);
   if (!fits || !user) return undefined;
+  if (isCheaper(user.passwordHash)) await user.update({ passwordHash: await hashPassword(password) }, { fields: ["passwordHash"] });
   await signOut(oldSeal);
   const id = freshId();
   await openSession({ idHash: hashOf(id), userId: user.id, keep, device: device.slice(0, 200) });
   return sealId(id);
 }
 
-/** The newest sessions stay; the oldest of an account that has too many goes. */
+/** The newest sessions stay; of an account that has too many go ids that were replaced, then the oldest. */
 async function openSession({ idHash, userId, keep, device }: { idHash: string; userId: string; keep: boolean; device: string }) {
   await inTransaction(async (transaction) => {
     // The account's row is held, so that two sign-ins count one after the other.
     await User.findOne({ where: { id: userId }, lock: transaction.LOCK.UPDATE, transaction });
     const fields: ("idHash" | "userId" | "keep" | "device")[] = ["idHash", "userId", "keep", "device"];
     await Session.create({ idHash, userId, keep, device }, { fields, transaction });
-    const live = await Session.findAll({ where: { userId }, order: [["seenAt", "DESC"]], transaction });
+    const live = await Session.findAll({ where: { userId }, order: [["replacedAt", "ASC NULLS FIRST"], ["seenAt", "DESC"]], transaction });
     const newest = [...live.filter((one) => one.idHash === idHash), ...live.filter((one) => one.idHash !== idHash)];
     const gone = newest.slice(LIVE_SESSIONS).map((one) => one.idHash);
     if (gone.length) await Session.destroy({ where: { idHash: { [Op.in]: gone } }, transaction });
   });
 }
 
-/** Ends the session behind a cookie, at once and for every copy of it. */
+/** Ends the session behind a cookie, at once and for every copy of it, also under the id it had or got a moment ago. */
 export async function signOut(seal: string | undefined): Promise<void> {
   const id = await unsealId(seal);
-  if (id) await Session.destroy({ where: { idHash: hashOf(id) } });
+  const session = id && (await Session.findOne({ where: { idHash: hashOf(id) } }));
+  if (!session) return;
+  const { idHash, userId, issuedAt, replacedAt } = session;
+  const same = [{ idHash }, { replacedAt: within(issuedAt) }, ...(replacedAt ? [{ issuedAt: within(replacedAt) }] : [])];
+  await Session.destroy({ where: { userId, [Op.or]: same } });
 }
+
+/** A change of id writes one moment into both rows. The database's moments are finer than ours. */
+const within = (moment: Date) => ({ [Op.gte]: moment, [Op.lt]: new Date(moment.getTime() + 1) });
 
 /** A new id for a session that has had its own for a day. The old one holds a minute more; of two askers one renews. */
 export async function renewSession({ session }: Reader): Promise<string | undefined> {

@@ -13,8 +13,8 @@ function secretOf(password: string): string {
   return createHmac("sha384", env().pepper).update(password.normalize("NFC"), "utf8").digest("base64");
 }
 
-export async function hashPassword(password: string): Promise<string> {
-  return String(await askWorker({ verb: "hash", secret: secretOf(password), cost: PASSWORD_COST }));
+export async function hashPassword(password: string, cost = PASSWORD_COST): Promise<string> {
+  return String(await askWorker({ verb: "hash", secret: secretOf(password), cost }));
 }
 
 /** Hash of a password nobody has, of the same cost: an unknown address takes as long as a known one. */
@@ -25,3 +25,6 @@ export async function matchesPassword(password: string, hash: string | undefined
   const matches = await askWorker({ verb: "compare", secret: secretOf(password), hash: hash ?? NOBODY });
   return matches === true && hash !== undefined;
 }
+
+/** Whether a hash was made when less work was enough. */
+export const isCheaper = (hash: string) => Number(hash.split("$")[2]) < PASSWORD_COST;

@@ -2,9 +2,10 @@ import "server-only";
 import { Op, type Transaction } from "sequelize";
 import { Membership, Participation, Project } from "@/models";
 import { rightOf } from "./access";
+import { pageFault } from "./errors";
 import type { Reader } from "./identity";
 import { facts, type ProjectFacts } from "./projectPage";
-import { answerOf, peopleOf, readUnlessKept, rolesOf, type Person } from "./projects";
+import { peopleOf, prepareAnswer, rolesOf, type Person } from "./projects";
 import { inOneMoment } from "./transactions";
 import type { Answer } from "./weigh";
 
@@ -23,15 +24,15 @@ export async function listProjects(reader: Reader): Promise<ListedProject[]> {
     for (const project of projects) {
       const roles = await rolesOf(reader, project, transaction);
       if (rightOf(roles, "open project")?.right !== "may") continue;
-      rows.push({ project, people: await peopleOf(project, reader, transaction), stored: await readUnlessKept(project, transaction) });
+      rows.push({ project, people: await peopleOf(project, reader, transaction), finish: await prepareAnswer(project, transaction) });
     }
     return rows;
-  });
-  return found.map(({ project, people, stored }) => ({
+  }).catch((thrown: unknown) => Promise.reject(pageFault(thrown)));
+  return found.map(({ project, people, finish }) => ({
     project: facts(project),
     changedAt: project.changedAt,
     people,
-    answer: answerOf(project, stored),
+    answer: finish(),
   }));
 }
 

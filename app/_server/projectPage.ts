@@ -5,9 +5,9 @@ import { cache } from "react";
 import type { Project } from "@/models";
 import { rightOf, type Role } from "./access";
 import { cookieName } from "./cookies";
-import { Refusal } from "./errors";
+import { pageFault, Refusal } from "./errors";
 import { identify, type Reader } from "./identity";
-import { answerOf, openProject, peopleOf, readUnlessKept, refusalWords, type Person } from "./projects";
+import { openProject, peopleOf, prepareAnswer, refusalWords, type Person } from "./projects";
 import { inOneMoment } from "./transactions";
 import type { Answer } from "./weigh";
 
@@ -33,7 +33,8 @@ export interface OpenedPage {
 
 /** The reader of a page. One look-up per request, however often it is asked. */
 export const readerOfPage = cache(async (): Promise<Reader | undefined> => {
-  return identify((await cookies()).get(cookieName())?.value);
+  const seal = (await cookies()).get(cookieName())?.value;
+  return identify(seal).catch((thrown: unknown) => Promise.reject(pageFault(thrown)));
 });
 
 export async function requirePageReader(signIn: string): Promise<Reader> {
@@ -50,16 +51,16 @@ export async function openProjectPage(projectId: string, signIn: string): Promis
     return await pageOf(reader, projectId);
   } catch (thrown) {
     if (thrown instanceof Refusal && thrown.code === "missing") notFound();
-    throw thrown;
+    throw pageFault(thrown);
   }
 }
 
 async function pageOf(reader: Reader, projectId: string): Promise<OpenedPage> {
-  const { opened, people, reason, stored } = await inOneMoment(async (transaction) => {
+  const { opened, people, reason, finish } = await inOneMoment(async (transaction) => {
     const opened = await openProject({ reader, projectId, act: "open project", transaction });
     const people = await peopleOf(opened.project, reader, transaction);
     const reason = await refusalWords(opened.project, reader, transaction);
-    return { opened, people, reason, stored: await readUnlessKept(opened.project, transaction) };
+    return { opened, people, reason, finish: await prepareAnswer(opened.project, transaction) };
   });
   const edit = rightOf(opened.roles, "edit plan")?.right === "may" && !opened.project.archivedAt;
   return {
@@ -68,7 +69,7 @@ async function pageOf(reader: Reader, projectId: string): Promise<OpenedPage> {
     people,
     roles: opened.roles,
     may: { edit, reason: edit ? "" : opened.project.archivedAt ? "This yard is archived." : reason },
-    answer: answerOf(opened.project, stored),
+    answer: finish(),
   };
 }
 

@@ -1,15 +1,16 @@
 import "server-only";
 import { fn, type Transaction } from "sequelize";
+import { countPairs, MOST_PAIRS } from "@/lib/noise/sound/pairs";
 import { Project, Revision, User, type Act } from "@/models";
-import { advancePlan, readPlan, type StoredPlan } from "@/models/parts";
+import { advancePlan, readPlan } from "@/models/parts";
 import type { ActName } from "./access";
 import { answer, jsonAnswer, renewed, requireReader } from "./answer";
 import { Refusal } from "./errors";
 import type { Reader } from "./identity";
-import { answerOf, openProject, readUnlessKept, type Opened } from "./projects";
+import { openProject, prepareAnswer, type Opened } from "./projects";
 import { readBody, readRevision, requireSameOrigin } from "./request";
 import { inOneMoment, inTransaction } from "./transactions";
-import { keptPlan } from "./weigh";
+import { keptPlan, weigh } from "./weigh";
 
 type Ids = { projectId: string };
 type Route<P> = (request: Request, context: { params: Promise<P> }) => Promise<Response>;
@@ -63,7 +64,7 @@ export function projectRoute<P extends Ids>(act: ActOf<P>, change: (given: Chang
             change({ params, projectId: params.projectId, project, body, transaction }),
           ),
         );
-        return await renewed(jsonAnswer(answerOf(project, stored)), reader);
+        return await renewed(jsonAnswer(weigh(project.id, project.revision, stored)), reader);
       } catch (thrown) {
         if (thrown instanceof Stale) return await staleAnswer(thrown);
         throw thrown;
@@ -92,7 +93,15 @@ async function changed({ reader, params, act, made, transaction }: Making, chang
   if (acts.length) await record({ project, acts, reader, role, transaction });
   // Under the lock the plan of the revision before is the rows as they stood: no need to read them all again.
   const stored = plan ? { plan: advancePlan(plan, acts), damage: [] } : await readPlan(projectId, transaction);
+  if (acts.some(({ act }) => act !== "remove")) refuseTooMany(countPairs(stored.plan));
   return { project, stored };
+}
+
+/** The bound on the work of one verdict. What only takes away is never refused. */
+function refuseTooMany(pairs: number) {
+  if (pairs <= MOST_PAIRS) return;
+  const words = "This would be more ways from wall to wall through the yard than we can weigh";
+  throw new Refusal("conflict", `${words}: ${pairs} of at most ${MOST_PAIRS}. Join small elements of one wall, or take some away first.`);
 }
 
 interface Recording {
@@ -123,15 +132,14 @@ class Stale extends Error {
 
 /** 409 with the plan as it stands now, who changed it, and which parts they touched. */
 async function staleAnswer({ projectId, made }: Stale): Promise<Response> {
-  const { project, stored, since } = await inOneMoment(async (transaction) => {
+  const { project, finish, since } = await inOneMoment(async (transaction) => {
     const project = await Project.findOne({ where: { id: projectId }, rejectOnEmpty: true, transaction });
-    const stored: StoredPlan | undefined = await readUnlessKept(project, transaction);
-    return { project, stored, since: await revisionsSince(projectId, made, transaction) };
+    return { project, finish: await prepareAnswer(project, transaction), since: await revisionsSince(projectId, made, transaction) };
   });
   const last = since.at(-1);
   const name = last?.user?.name ?? "Somebody";
-  const changedBy = { name, at: last?.at ?? project.changedAt, parts: since.flatMap(({ acts }) => acts) };
-  const more = { current: answerOf(project, stored), changedBy };
+  const changedBy = { name, at: last?.at ?? project.changedAt, whole: since.length === project.revision - made, parts: since.flatMap(({ acts }) => acts) };
+  const more = { current: finish(), changedBy };
   const refusal = new Refusal("conflict", `${name} changed this yard in the meantime.`, { more });
   return answer(() => Promise.reject(refusal));
 }

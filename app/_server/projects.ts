@@ -31,9 +31,11 @@ export async function openProject({ reader, projectId, act, transaction }: Openi
   const right = rightOf(roles, act);
   if (!project || !right) throw notFound();
   if (right.right === "refused") throw new Refusal("refused", await refusalWords(project, reader, transaction));
-  if (project.archivedAt && writes.has(act)) throw new Refusal("conflict", "This yard is archived. Restore it to change it.");
+  if (project.archivedAt && writes.has(act)) throw archivedRefusal();
   return { project, role: right.role, roles };
 }
+
+export const archivedRefusal = () => new Refusal("conflict", "This yard is archived. Restore it to change it.");
 
 /** An id that nothing has. */
 const NOTHING = "00000000-0000-0000-0000-000000000000";
@@ -77,16 +79,15 @@ export async function peopleOf({ id, teamId }: Project, reader: Reader, transact
     .sort((one, other) => order.indexOf(one.role) - order.indexOf(other.role) || one.name.localeCompare(other.name));
 }
 
-/** The rows of a project, unless its answer of this revision is still in memory. */
-export async function readUnlessKept(project: Project, transaction: Transaction): Promise<StoredPlan | undefined> {
-  return keptAnswer(project.id, project.revision) ? undefined : readPlan(project.id, transaction);
-}
-
-export function answerOf({ id, revision }: Project, stored: StoredPlan | undefined): Answer {
-  const answer = stored ? weigh(id, revision, stored) : keptAnswer(id, revision);
-  // Between the two looks another request may have pushed it out of memory.
-  if (!answer) throw new Refusal("busy", "Try again in a moment.", { retryAfter: 1 });
-  return answer;
+/**
+ * Gathers inside a transaction what an answer needs; the answer itself is made outside it. One that memory holds is held
+ * on to: others may push it out of memory meanwhile.
+ */
+export async function prepareAnswer({ id, revision }: Project, transaction: Transaction): Promise<() => Answer> {
+  const kept = keptAnswer(id, revision);
+  if (kept) return () => kept;
+  const stored = await readPlan(id, transaction);
+  return () => weigh(id, revision, stored);
 }
 
 /** All of one listener's verdict: every contribution, not the largest only. */

@@ -14,6 +14,8 @@ export interface ChangedBy {
   name: string;
   /** ISO 8601. */
   at: string;
+  /** Whether `parts` holds all that was touched since; of very many changes only the last are named. */
+  whole: boolean;
   parts: TouchedPart[];
 }
 
@@ -68,8 +70,9 @@ interface Request {
 async function write(request: Request, revision: number, collides: (touched: ReadonlySet<string>) => boolean): Promise<Saved> {
   const first = await send(request, revision);
   if (first.kind !== "stale") return first;
-  const touched = new Set(first.changedBy.parts.map(({ id }) => id));
-  return collides(touched) ? first : send(request, first.current.revision);
+  const { whole, parts } = first.changedBy;
+  const touched = new Set(parts.map(({ id }) => id));
+  return !whole || collides(touched) ? first : send(request, first.current.revision);
 }
 
 const SECONDS = 30;

@@ -27,7 +27,12 @@ function SquaresBar({ part }: { part: number }) {
   );
 }
 
+/** Parts under this would read 0.0; they stand together in one row. */
+const SMALL = 0.05;
+
 function Doubts({ doubts }: Pick<ReceiverVerdict, "doubts">) {
+  const small = doubts.filter(({ decibels }) => decibels < SMALL);
+  const together = Math.sqrt(small.reduce((sum, { decibels }) => sum + decibels ** 2, 0));
   const whole = doubts.reduce((sum, { decibels }) => sum + decibels ** 2, 0) || 1;
   return (
     <table className="w-full border-collapse text-table">
@@ -40,7 +45,7 @@ function Doubts({ doubts }: Pick<ReceiverVerdict, "doubts">) {
         </tr>
       </thead>
       <tbody>
-        {doubts.map((doubt) => (
+        {doubts.filter((doubt) => !small.includes(doubt)).map((doubt) => (
           <tr key={`${doubt.what} ${doubt.partId} ${doubt.name}`} className="border-b border-rule">
             <th scope="row" className="py-2 pr-3 text-left font-semibold">
               {capitalise(doubt.name)} {doubt.what !== "outdoors" && <span className="font-normal text-ink3">{partWords[doubt.what]}</span>}
@@ -53,6 +58,16 @@ function Doubts({ doubts }: Pick<ReceiverVerdict, "doubts">) {
             </td>
           </tr>
         ))}
+        {small.length > 0 && (
+          <tr className="border-b border-rule text-ink2">
+            <th scope="row" className="py-2 pr-3 text-left font-normal">{`The other ${small.length} together`}</th>
+            <td className="py-2 pr-3 max-mid:hidden" />
+            <td className="whitespace-nowrap py-2 text-right">{together < SMALL ? `under ${sizeWords(0.1)}` : sizeWords(together)}</td>
+            <td className="py-2 pl-5 max-mid:hidden">
+              <SquaresBar part={together ** 2 / whole} />
+            </td>
+          </tr>
+        )}
       </tbody>
     </table>
   );
@@ -60,8 +75,9 @@ function Doubts({ doubts }: Pick<ReceiverVerdict, "doubts">) {
 
 /** "How sure is this?": what the doubt is made of, largest first, and what of the verdict rests on estimates. */
 export function DoubtPanel({ id, listener, weighed }: Props) {
-  const { doubt, band, doubts, restsOn } = weighed;
-  const where = band === null ? "" : ` at ${bandWords(band)}`;
+  const { doubt, band, doubts, restsOn, weighted } = weighed;
+  const at = band === null ? "" : ` at ${bandWords(band)}`;
+  const where = weighted ? " as a whole" : at;
   return (
     <section id={id} aria-labelledby={`${id}-head`} className="mt-3 rounded-sheet bg-sheet p-4 mid:mt-5 mid:p-6.5">
       <h2 id={`${id}-head`} tabIndex={-1} className="text-section">
@@ -70,7 +86,7 @@ export function DoubtPanel({ id, listener, weighed }: Props) {
       <p className="mt-1 max-w-[68ch] text-ink2">
         {doubt === null
           ? `Nothing is weighed for ${listener} yet, so there is no doubt to name.`
-          : `The level for ${listener}${where} is good to ${sizeWords(doubt)} either way: about two chances in three that the true one lies within. The parts below add as squares, so the largest counts most.`}
+          : `The level for ${listener}${where} is good to ${sizeWords(doubt)} either way: about two chances in three that the true one lies within. The parts below${weighted ? `, as they stand${at},` : ""} add as squares, so the largest counts most.`}
       </p>
       {doubts.length > 0 && (
         <div className="mt-4">

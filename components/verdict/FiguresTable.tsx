@@ -22,15 +22,24 @@ interface Line {
 
 const orNothing = (value: number | null, write: (value: number) => string) => (value === null ? "" : write(value));
 
+/** Where a part is unknown, the figures of the known parts are only a bound. */
+const bound = ({ level: figure }: Column, words: string) => (figure === "unknown" ? words : "");
+
+const boundOfMargin = (column: Column, words: string) => (typeof column.margin === "number" ? bound(column, words) : "");
+
 const level: Line = { words: "Level, dB", write: ({ level: figure }) => wholeDecibels(figure), speak: ({ level: figure }) => spokenFigure(figure) };
 const limit: Line = { words: "Limit, dB", write: ({ limit: figure }) => orNothing(figure, wholeDecibels), speak: ({ limit: figure }) => orNothing(figure, spokenFigure) };
 const roomLeft: Line = {
   words: "Room left",
-  write: ({ margin }) => (margin === null ? "" : oneDecimal(margin)),
-  speak: ({ margin }) => (margin === null ? "" : spokenFigure(margin, 1)),
+  write: (column) => (column.margin === null ? "" : boundOfMargin(column, "≤") + oneDecimal(column.margin)),
+  speak: (column) => (column.margin === null ? "" : boundOfMargin(column, "at most ") + spokenFigure(column.margin, 1)),
   judged: true,
 };
-const spent: Line = { words: "Spent", write: (column) => orNothing(column.spent, percent), speak: (column) => orNothing(column.spent, percent) };
+const spent: Line = {
+  words: "Spent",
+  write: (column) => orNothing(column.spent, (share) => bound(column, "≥") + percent(share)),
+  speak: (column) => orNothing(column.spent, (share) => bound(column, "at least ") + percent(share)),
+};
 /** The unit stands once, in the head of the row: nine columns may be narrow. */
 const spentPart: Line = { ...spent, words: "Spent, %", write: (column) => spent.write(column).replace(/\u00a0%$/, "") };
 

@@ -74,7 +74,7 @@ function Legend({ doubt }: { doubt: number | null }) {
         <li><MarginWords state="over" className="font-normal"><span className="text-ink2">over: above the limit</span></MarginWords></li>
       </ul>
       <p className="mt-3 text-least text-ink3">
-        Each notch is 1 dB, the pivot is the limit. The pale band is the doubt: how far the estimate may be out{doubt === null ? "" : `, ${by} for the lit listener`}.
+        Each notch is 1 dB, the pivot is the limit. The pale band is the doubt: how far the estimate may be out{doubt === null ? "" : `, ${by} for the lit listener where its verdict is taken; every band has its own`}.
       </p>
     </div>
   );

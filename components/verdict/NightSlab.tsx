@@ -43,6 +43,9 @@ function Cut({ reading, column }: { reading: Reading; column: Column }) {
   const source = plan.sources.find(({ id }) => id === weighed.crossCut?.source?.id);
   return (
     <div ref={place} className="min-w-0 self-end overflow-hidden">
+      <p className="mb-2 text-second text-slabink2">
+        Levels in {column.unit} {column.where}
+      </p>
       <CrossCutDrawing
         cut={weighed.crossCut}
         stations={stationsOf(reading, column, widthClass === 390)}

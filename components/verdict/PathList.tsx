@@ -36,7 +36,7 @@ function aloneWords(path: PathVerdict, column: Column): string {
 }
 
 function spokenRow(path: PathVerdict, column: Column, silenced: boolean): string {
-  const alone = `${spokenFigure(aloneOf(path, column))} dB alone`;
+  const alone = `${spokenFigure(aloneOf(path, column))} ${column.unit} alone`;
   return [path.name, alone, percent(shareOf(path, column)), silenced ? "silenced on trial" : ""].filter(Boolean).join(", ");
 }
 

@@ -1,4 +1,4 @@
-import { OCTAVE_BANDS } from "@/lib/noise/bands";
+import { FIRST_JUDGED, OCTAVE_BANDS, type Band } from "@/lib/noise/bands";
 import type { ReceiverVerdict } from "@/lib/noise/verdict";
 import { capitalise, formatNumber, marginWords, wholeDecibels, withUnit } from "../format";
 import { causeWords, MOST, nearestWords, remedyWords, settleWords } from "./causeWords";
@@ -42,8 +42,19 @@ function wholeWords({ weighed: { weighted, metric } }: Reading): string {
   return weighted ? `The limit is ${withUnit(wholeDecibels(weighted.limit), weightedUnit(metric))} for the whole.` : "";
 }
 
-function figureWords(state: ReceiverVerdict["state"], margin: number): string {
-  return marginWords(state === "tight" ? "under" : state, margin);
+/** Judged bands whose level is not known in full: the known parts alone may be over already. */
+function openBands({ bands }: ReceiverVerdict): Band[] {
+  return bands.slice(FIRST_JUDGED).flatMap(({ band, level }) => (level === "unknown" ? [band] : []));
+}
+
+function figureWords(weighed: ReceiverVerdict, margin: number): string {
+  const words = marginWords(weighed.state === "tight" ? "under" : weighed.state, margin);
+  return weighed.state === "over" && openBands(weighed).length > 0 ? `at least ${words}` : words;
+}
+
+function openWords({ weighed }: Reading): string {
+  const open = openBands(weighed);
+  return open.length > 0 ? `Not known in full ${bandRangeWords(open)}: there it may be more.` : "";
 }
 
 function weighedWords(reading: Reading, margin: number): Pick<SlabWords, "before" | "figure" | "after"> {
@@ -58,7 +69,7 @@ function weighedWords(reading: Reading, margin: number): Pick<SlabWords, "before
   };
   return {
     before: typeset(`${head} ${subjectOf(reading)} will be `),
-    figure: figureWords(state, margin),
+    figure: figureWords(reading.weighed, margin),
     after: typeset(` ${margin === 0 ? "of " : ""}${mayHear(reading)}${tails[state]}`),
   };
 }
@@ -96,7 +107,7 @@ export function slabWordsOf(reading: Reading): SlabWords {
   const { weighed } = reading;
   if (weighed.state === "not weighed" || weighed.margin === null) return unweighedWords(reading);
   const lines = linesOf(reading).map((words) => typeset(words.trim())).filter(Boolean);
-  const notes = [lowestWords(reading), restsOnWords(reading)].map(typeset).filter(Boolean);
+  const notes = [openWords(reading), lowestWords(reading), restsOnWords(reading)].map(typeset).filter(Boolean);
   return { ...weighedWords(reading, weighed.margin), place: placeWords(reading), lines, notes };
 }
 

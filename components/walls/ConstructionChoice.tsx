@@ -114,7 +114,7 @@ interface ChoiceProps {
 
 function Choice({ group, sheet, loss, marked, standing, onMark }: ChoiceProps) {
   const [low] = SHOWN;
-  const basis = (loss[low!] !== "unknown" && sheet.bases[low!]) || "unknown";
+  const basis = basisOf(sheet, loss);
   const figure = "text-right text-table font-semibold";
   return (
     <label
@@ -163,9 +163,21 @@ const massOf = ({ surfaceMass }: ConstructionSheet) =>
   surfaceMass === null ? "–" : formatNumber(surfaceMass, surfaceMass < 10 ? 1 : 0);
 const measures = (sheet: ConstructionSheet) => `${thicknessOf(sheet)} mm, ${massOf(sheet)} kg/m²`;
 
+const basisOf = ({ bases }: ConstructionSheet, loss: ConstructionSheet["loss"]) =>
+  (loss[SHOWN[0]!] !== "unknown" && bases[SHOWN[0]!]) || "unknown";
+
+const decibelsSpoken = (loss: ConstructionSheet["loss"][number]) =>
+  typeof loss === "number" ? `${wholeDecibels(loss)} dB` : loss;
+
+const spokenMeasures = (sheet: ConstructionSheet) =>
+  [
+    sheet.thickness === null ? "thickness unknown" : `${thicknessOf(sheet)} mm`,
+    sheet.surfaceMass === null ? "weight unknown" : `${massOf(sheet)} kg/m²`,
+  ].join(", ");
+
 function spoken(sheet: ConstructionSheet, loss: ConstructionSheet["loss"], standing: boolean): string {
   const stops = SHOWN.map(
-    (index) => `${wholeDecibels(loss[index] ?? "unknown")} dB at ${OCTAVE_BANDS[index]} Hz`,
+    (index) => `${decibelsSpoken(loss[index] ?? "unknown")} at ${OCTAVE_BANDS[index]} Hz`,
   ).join(", ");
-  return `${sheet.name}${standing ? ", stands here now" : ""}, ${measures(sheet)}, stops ${stops}, ${sheet.bases[SHOWN[0]!] ?? "unknown"}`;
+  return `${sheet.name}${standing ? ", stands here now" : ""}, ${spokenMeasures(sheet)}, stops ${stops}, ${basisOf(sheet, loss)}`;
 }

@@ -2,6 +2,7 @@ import type { Plan } from "../../lib/noise/plan";
 import type { Provenance } from "../../lib/noise/spectrum";
 import type { ConstructionSheet } from "../../lib/noise/sheet";
 import { Sheet } from "../ui/Sheet";
+import { isMasonry } from "./cautions";
 import { directionOf, wordsOf, type PathElement } from "./elementWords";
 import { LayerTable } from "./LayerTable";
 
@@ -28,7 +29,7 @@ export function LayersSheet({ element, plan, sheet, lit, onLight }: Props) {
         <LayerTable
           sheet={sheet}
           whole={`Whole ${wordsOf(element).one}`}
-          counted={element.kind === "window" ? "panes alone" : "boards alone"}
+          counted={countedIn(element, sheet)}
           lit={lit}
           onLight={onLight}
         />
@@ -42,6 +43,12 @@ export function LayersSheet({ element, plan, sheet, lit, onLight }: Props) {
       </p>
     </Sheet>
   );
+}
+
+function countedIn({ kind }: PathElement, sheet: ConstructionSheet): string {
+  if (kind === "window") return "panes alone";
+  if (kind === "door" && sheet.layers.length === 1) return "leaf alone";
+  return isMasonry(sheet) ? "all of it" : "boards alone";
 }
 
 function reasonFor({ kind }: PathElement): string {

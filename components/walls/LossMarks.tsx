@@ -42,7 +42,7 @@ export function Grid({ scales, frame, litBand }: { scales: LossScales; frame: Fr
           fontWeight={index === litBand ? 700 : 400}
           letterSpacing={scales.pitch < 29 ? "-0.4" : undefined}
         >
-          {formatBand(band)}
+          {isNamed(index, litBand, scales.pitch) && formatBand(band)}
         </text>
       ))}
       <text x={frame.right + 8} y={frame.foot + 22} className="fill-ink3!">
@@ -50,6 +50,15 @@ export function Grid({ scales, frame, litBand }: { scales: LossScales; frame: Fr
       </text>
     </g>
   );
+}
+
+/** Pixels a band needs for its name; where there are fewer, every other band is named. */
+const ROOM_FOR_NAME = 25;
+
+/** The lit band always has its name; on a narrow axis its neighbours give way to it. */
+function isNamed(index: number, litBand: number, pitch: number): boolean {
+  if (pitch >= ROOM_FOR_NAME || index === litBand) return true;
+  return index % 2 === 0 && Math.abs(index - litBand) > 1;
 }
 
 /** The resonance of the leaves on the air between them, left out where it lies below the lowest band. */
@@ -86,10 +95,11 @@ export function Swing({ frequency, scales, frame }: { frequency: number; scales:
 }
 
 export function LitFigure({ point, scales }: { point: LossPoint; scales: LossScales }) {
+  const below = scales.y(point.loss) + 18;
   return (
     <text
       x={scales.x(point.band) + 11}
-      y={scales.y(point.loss) + 18}
+      y={below < scales.y(0) ? below : scales.y(point.loss) - 14}
       fontSize="14"
       fontWeight="650"
       paintOrder="stroke"

@@ -1,7 +1,7 @@
 import { BAND_COUNT, OCTAVE_BANDS } from "../../lib/noise/bands";
 import type { Basis } from "../../lib/noise/spectrum";
 import type { Out } from "../../lib/noise/verdict";
-import { bandWords, formatNumber, oneDecimal, withUnit } from "../format";
+import { bandWords, formatNumber, oneDecimal, withUnit, type BasisWord } from "../format";
 import { BasisMark } from "../marks/BasisMark";
 import { Cell, HeadCell, Row, RowHead, Table } from "../ui/Table";
 
@@ -42,9 +42,13 @@ export function LossTable({ loss, doubts, bases, litBand }: Props) {
 }
 
 /** "Estimated at 31.5 Hz, calculated from 63 Hz up, give or take 5 dB at 63 Hz." */
-export function basisSentence(bases: readonly Basis[], doubts: readonly number[], litBand: number): string {
-  const runs: { basis: Basis; from: number; to: number }[] = [];
-  bases.forEach((basis, index) => {
+export function basisSentence(
+  { loss, bases, doubts }: Pick<Props, "loss" | "bases" | "doubts">,
+  litBand: number,
+): string {
+  const runs: { basis: BasisWord; from: number; to: number }[] = [];
+  bases.forEach((figure, index) => {
+    const basis = loss[index] === "unknown" ? "unknown" : figure;
     const run = runs.at(-1);
     if (run?.basis === basis) run.to = index;
     else runs.push({ basis, from: index, to: index });
@@ -52,7 +56,7 @@ export function basisSentence(bases: readonly Basis[], doubts: readonly number[]
   const words = runs.map(({ basis, from, to }) => `${basis} ${rangeWords(from, to)}`.trim()).join(", ");
   const doubt = doubts[litBand];
   const give =
-    doubt === undefined
+    doubt === undefined || loss[litBand] === "unknown"
       ? ""
       : `; give or take ${withUnit(formatNumber(doubt, doubt < 2 ? 1 : 0), "dB")} at ${bandWords(OCTAVE_BANDS[litBand]!)}`;
   return `${words.charAt(0).toUpperCase()}${words.slice(1)}${give}.`;

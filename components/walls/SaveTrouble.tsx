@@ -1,5 +1,6 @@
 "use client";
 
+import { useEffect, useRef } from "react";
 import { Button, LinkButton } from "../ui/Button";
 import { Strip } from "../ui/Strip";
 
@@ -11,8 +12,18 @@ interface Props {
   onRetry: () => void;
 }
 
-/** A save that did not arrive. What was typed stays where it stands. */
-export function SaveTrouble({ trouble, signInHref, onRetry }: Props) {
+/** A save that did not arrive. What was typed stays where it stands; the words come into sight from any field. */
+export function SaveTrouble(props: Props) {
+  const place = useRef<HTMLDivElement>(null);
+  useEffect(() => place.current?.scrollIntoView?.({ block: "nearest" }), [props.trouble]);
+  return (
+    <div ref={place} className="scroll-mt-28">
+      <TroubleStrip {...props} />
+    </div>
+  );
+}
+
+function TroubleStrip({ trouble, signInHref, onRetry }: Props) {
   if (trouble.kind === "signedOut") {
     return (
       <Strip

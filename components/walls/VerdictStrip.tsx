@@ -75,7 +75,7 @@ function LeadWords({
   const { margin, doubt, band, unproven, weighted } = lead.receiver;
   const moved = before ? movedBy(before, answer) : null;
   const tail = [
-    band !== null && margin !== null && `${weighted ? "mostly at" : "at"} ${bandWords(band)}`,
+    band !== null && margin !== null && `${weighted ? "loudest at" : "at"} ${bandWords(band)}`,
     doubt !== null && margin !== null && `give or take ${withUnit(formatNumber(doubt), "dB")}`,
   ].filter(Boolean);
   return (
@@ -115,7 +115,7 @@ function Loudest({
   const where = lead.receiver.weighted ? "of the whole" : `at ${bandWords(OCTAVE_BANDS[lead.bandIndex]!)}`;
   return (
     <p className="text-second text-ink2">
-      Most of it comes by{" "}
+      {share > 0.5 ? "Most of it" : "The largest part"} comes by{" "}
       {element && element.id !== elementId ? (
         <Link href={elementAddress(projectId, element.id)} className="font-semibold text-ink">
           {path.name}

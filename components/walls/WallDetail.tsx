@@ -120,7 +120,7 @@ export function WallDetail({ projectId, elementId, library, may }: WallDetailPro
               heading={`Another ${words.one}`}
               says={
                 may.edit
-                  ? `The library's ${words.many}, by what they stop at 63 Hz. Choosing one weighs at once.`
+                  ? `The library’s ${words.many}, by what they stop at 63 Hz. Mark one, then choose it: that weighs at once.`
                   : undefined
               }
             >

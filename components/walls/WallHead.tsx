@@ -26,12 +26,12 @@ export function WallHead({ element, sheet, judged, litBand, place, indexHref }: 
   const size =
     element.kind === "leak"
       ? [formatQuantity(toSquareCentimetres(element.area)), "cm²"]
-      : [formatNumber(element.area, 1), "m²"];
+      : [formatNumber(element.area, element.area < 1 ? 2 : 1), "m²"];
   return (
     <div className="mb-4 flex flex-wrap items-end justify-between gap-x-12 gap-y-4 mid:mb-5">
       <div className="min-w-0">
         <p className="text-second text-ink2">
-          <Link href={indexHref} className="inline-flex min-h-6 items-center">
+          <Link href={indexHref} className="relative inline-flex min-h-6 items-center">
             Walls &amp; openings
           </Link>
           , {place.number} of {place.of}

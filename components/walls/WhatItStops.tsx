@@ -29,7 +29,7 @@ export function WhatItStops({ name, judged, sheet, other, litBand }: Props) {
         litBand={litBand}
       />
       <p className="mt-2 text-second text-ink2">
-        {basisSentence(judged.bases, judged.doubts, litBand)} {opening}
+        {sheet ? basisSentence(judged, litBand) : "Reckoned from its open area as entered."} {opening}
       </p>
       <p className="mt-2 text-second text-ink2">
         An estimate, not a promise: workmanship and ways nobody has drawn change it.

@@ -21,14 +21,20 @@ const carried = new Set<PathElement["kind"]>(["wall", "roof", "floor", "ceiling"
 /** What the builder must know of this element besides its decibels. None of it holds a figure without a source. */
 export function cautionsOf(subject: Subject): Caution[] {
   return [
-    ...gapCautions(subject.sheet),
+    ...gapCautions(subject),
     ...leafCautions(subject.sheet),
     ...weightCautions(subject),
     ...kindCautions(subject),
   ];
 }
 
-function gapCautions(sheet?: ConstructionSheet): Caution[] {
+/** What the channel hangs on, by what is built. */
+const timberOf = ({ kind }: PathElement): string => {
+  if (kind === "roof") return "rafter";
+  return kind === "floor" || kind === "ceiling" ? "joist" : "stud";
+};
+
+function gapCautions({ element, sheet }: Subject): Caution[] {
   const number = (sheet?.layers.findIndex(({ look, fill }) => look === "gap" && fill === 0) ?? -1) + 1;
   if (!sheet || number === 0 || sheet.leaves < 2) return [];
   const joint = sheet.joints[0];
@@ -36,8 +42,7 @@ function gapCautions(sheet?: ConstructionSheet): Caution[] {
     return [
       {
         heading: `Nothing through layer ${number}`,
-        words:
-          "A screw that passes the channel and reaches the stud ties the two leaves together, and the channel might as well not be there.",
+        words: `A screw that passes the channel and reaches the ${timberOf(element)} ties the two leaves together, and the channel might as well not be there.`,
       },
     ];
   }
@@ -62,17 +67,25 @@ function leafCautions(sheet?: ConstructionSheet): Caution[] {
   ];
 }
 
-function weightCautions({ element, weight, weightBefore }: Subject): Caution[] {
+/** Stone all through: no boards, no frame, no wool. */
+export const isMasonry = (sheet?: ConstructionSheet) =>
+  sheet !== undefined && sheet.layers.length > 0 && sheet.layers.every(({ look }) => look === "masonry");
+
+function weightCautions({ element, sheet, weight, weightBefore }: Subject): Caution[] {
   if (weight === null || !carried.has(element.kind)) return [];
   const more = weightBefore === null ? 0 : weight - weightBefore;
   const change =
     Math.round(more) === 0
       ? ""
       : `, ${withUnit(formatNumber(Math.abs(more)), "kg")} ${more > 0 ? "more" : "less"} than before`;
+  const kilograms = `${withUnit(formatNumber(weight), "kg")}${change}`;
+  const whole = isMasonry(sheet)
+    ? `This ${element.kind} weighs ${kilograms}.`
+    : `The boards of this ${element.kind} weigh ${kilograms}; frame and wool come on top.`;
   return [
     {
       heading: "Ask a structural engineer",
-      words: `The boards of this ${element.kind} weigh ${withUnit(formatNumber(weight), "kg")}${change}; frame and wool come on top. Whoever answers for the building must say that it carries that, and the stack on site too.`,
+      words: `${whole} Whoever answers for the building must say that it carries that, and the stack on site too.`,
     },
   ];
 }

@@ -1,9 +1,7 @@
 import { formatNumber, withUnit } from "../format";
 
-/** "2 dB better than before", "less than 1 dB worse than before", "as before". */
+/** "2.4 dB better than before", "as before": one decimal, since two rounded margins beside it may differ by more. */
 export function movementWords(moved: number): string {
   if (Math.abs(moved) < 0.05) return "as before";
-  const whole = Math.round(Math.abs(moved));
-  const amount = whole === 0 ? `less than ${withUnit("1", "dB")}` : withUnit(formatNumber(whole), "dB");
-  return `${amount} ${moved > 0 ? "better" : "worse"} than before`;
+  return `${withUnit(formatNumber(Math.abs(moved), 1), "dB")} ${moved > 0 ? "better" : "worse"} than before`;
 }

@@ -32,7 +32,7 @@ export function groupRooms(count: number, links: readonly Link[]): Int32Array {
 }
 
 /** Factors a symmetric positive definite matrix in place, lower triangle, and leaves its inverse in `matrix`. */
-export function invertInPlace(matrix: Float64Array, size: number): void {
+function invertInPlace(matrix: Float64Array, size: number): void {
   for (let j = 0; j < size; j += 1) {
     let pivot = matrix[j * size + j];
     for (let k = 0; k < j; k += 1) pivot -= matrix[j * size + k] ** 2;

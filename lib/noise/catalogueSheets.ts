@@ -1,8 +1,10 @@
 import { catalogue, type CatalogueConstruction } from "./catalogue";
 import { effectiveLoss } from "./effective";
 import type { PathElement } from "./elements";
-import { sheetOf, toOutLoss, type ConstructionSheet } from "./sheet";
-import { gapCombined } from "./transmission";
+import { levelOf } from "./levels";
+import { passingOfKind } from "./model/passing";
+import { sheetOf, type ConstructionSheet } from "./sheet";
+import { toOutSpectrum } from "./verdict";
 
 let sheets: Map<CatalogueConstruction, ConstructionSheet> | undefined;
 
@@ -24,12 +26,14 @@ export function catalogueSheets(element: PathElement): ConstructionSheet[] {
 }
 
 function hungIn(element: PathElement, record: CatalogueConstruction) {
-  const alone = effectiveLoss({ ...record, id: record.key }).loss;
-  return toOutLoss(gapCombined([...alone], element.area, openAreaOf(element, record)));
+  const { loss } = effectiveLoss({ ...record, id: record.key });
+  return toOutSpectrum(
+    passingOfKind(withGapOf(record, element), loss).map((each) => -levelOf(each / element.area)),
+  );
 }
 
-/** Area with R = 0 once that record is chosen for the element, m². */
-function openAreaOf(element: PathElement, { suggested }: CatalogueConstruction): number {
-  if (element.kind === "door") return suggested?.gapArea ?? element.params.gapArea;
-  return element.kind === "window" ? element.params.openArea : 0;
+/** The element with the gap that a record brings along, where it brings one. */
+function withGapOf({ suggested }: CatalogueConstruction, element: PathElement): PathElement {
+  const gapArea = suggested?.gapArea;
+  return element.kind === "door" && gapArea !== undefined ? { ...element, params: { gapArea } } : element;
 }

@@ -2,9 +2,8 @@ import { z } from "zod";
 import table from "../../data/curves.json";
 import { BAND_COUNT, OCTAVE_BANDS, type Band } from "./bands";
 import type { Criterion } from "./plan";
-import { provenanceSchema, toArithmetic } from "./spectrum";
+import { bandsSchema, provenanceSchema, toArithmetic } from "./spectrum";
 
-const bandsSchema = z.array(z.number()).refine((bands) => bands.every((band, i) => band === OCTAVE_BANDS[i]));
 const shared = {
   key: z.string(),
   label: z.string(),

@@ -19,7 +19,7 @@ export interface EffectiveLoss {
 const LEAF_SLOPE = -6;
 
 /** Loss as arithmetic: "silent" lets nothing pass. */
-export function lossOf(spectrum: Spectrum): Float64Array {
+function lossOf(spectrum: Spectrum): Float64Array {
   return toArithmetic(spectrum).map((loss) => (loss === -Infinity ? Infinity : loss));
 }
 

@@ -10,7 +10,7 @@ export const ON_FACADE = 10 ** 0.3;
 /** Emitters behind the plane of the facade lose 10 dB (engineering value of the method). */
 export const BEHIND_FACADE = 0.1;
 
-/** D_c of a radiating element, dB: in front of a vertical face, behind it, over a roof. */
+/** D_c of a radiating element, dB: in front of a vertical face, behind it, over a roof or another face that lies flat. */
 export const IN_FRONT = 3;
 export const BEHIND_BUILDING = -7;
 export const OVER_ROOF = 0;

@@ -14,14 +14,13 @@ const materialSchema = z.strictObject({
   source: z.string().min(1),
 });
 
+/** Elastic data of a board or sheet. */
 export type Material = z.output<typeof materialSchema>;
 
 /** Every material a ply may be named by, in the order of the table. */
 export const materials: readonly Material[] = z.array(materialSchema).nonempty().parse(table.records);
 
 const materialsByName = new Map(materials.map((material) => [material.name, material]));
-
-export const materialNames: readonly string[] = materials.map(({ name }) => name);
 
 /** The record of that name; `undefined` when the table has none. */
 export function findMaterial(name: string): Material | undefined {

@@ -1,8 +1,8 @@
+import { SPEED_OF_SOUND } from "./air";
 import { BAND_COUNT } from "./bands";
 import { airAttenuations } from "./outdoors/air";
 import type { Lot, Space, Surface } from "./plan";
 
-const SPEED_OF_SOUND = 343.2;
 /** T = 55.26 V/(c A): Sabine's formula, 24 ln 10 (solver method 4). */
 const SABINE = 55.26;
 /** 10 lg e: from dB/m to the power attenuation m in 1/m. */
@@ -19,6 +19,7 @@ export function decayOf(volume: number, area: number): number {
   return (SABINE * volume) / (SPEED_OF_SOUND * area);
 }
 
+/** Absorption area behind a decay time, m2: Sabine solved for A (solver method 4). Volume m3, time s. */
 export function areaFromDecay(volume: number, seconds: number): number {
   return (SABINE * volume) / (SPEED_OF_SOUND * seconds);
 }
@@ -36,6 +37,7 @@ export function airArea(volume: number, temperature: number, humidity: number): 
   return airAttenuations(temperature, humidity).map((attenuation) => (4 * attenuation * volume) / NEPER);
 }
 
+/** A surface of a room: area m2, absorption coefficient over the nine bands. */
 export interface Lining {
   readonly area: number;
   readonly alpha: Float64Array;
@@ -51,10 +53,9 @@ export function surfaceArea(linings: readonly Lining[], model: "sabine" | "eyrin
   });
 }
 
-function fromSurfaces(space: Space, surfaces: readonly Surface[], lot: Lot): Float64Array {
-  const { absorption, volume } = space;
-  if (absorption.kind !== "surfaces") throw new Error("a space without surfaces");
-  const own = surfaces.filter(({ spaceId }) => spaceId === space.id);
+type BySurfaces = Extract<Space["absorption"], { kind: "surfaces" }>;
+
+function fromSurfaces(absorption: BySurfaces, volume: number, own: readonly Surface[], lot: Lot) {
   const total = surfaceArea(
     own.map(({ area, alpha }) => ({ area, alpha: filled(alpha) })),
     absorption.model,
@@ -75,7 +76,8 @@ export function absorptionOf(space: Space, surfaces: readonly Surface[], lot: Lo
       seconds === null ? NaN : areaFromDecay(volume, seconds),
     );
   }
-  return fromSurfaces(space, surfaces, lot).map((area) => (area > 0 ? area : NaN));
+  const own = surfaces.filter(({ spaceId }) => spaceId === space.id);
+  return fromSurfaces(absorption, volume, own, lot).map((area) => (area > 0 ? area : NaN));
 }
 
 /** Schroeder's frequency 2000 sqrt(T/V), Hz, at the mean decay of 500 Hz and 1 kHz; null where it is not known. */
@@ -84,7 +86,7 @@ export function statisticalFrom(volume: number, decay: ArrayLike<number>): numbe
   return Number.isFinite(seconds) ? 2000 * Math.sqrt(seconds / volume) : null;
 }
 
-/** Energy in a room per unit of power: direct Q/(4 pi r^2) (no distance: none) and diffuse 4/A (solver method 4). */
+/** Direct sound at a distance in m per unit of power, 1/m2: Q/(4 pi r^2) (solver method 4). */
 export function directFactor(q: number, distance: number): number {
   return q / (4 * Math.PI * distance * distance);
 }

@@ -4,7 +4,7 @@ import { countLeaves } from "./layers";
 import { elementDeviation } from "./model/deviations";
 import { sheetLayersOf, type SheetLayer } from "./sheetLayers";
 import type { Basis, Provenance } from "./spectrum";
-import type { Out, OutSpectrum } from "./verdict";
+import { toOutSpectrum, type OutSpectrum } from "./verdict";
 
 export type { CutStud, LayerLook, SheetLayer } from "./sheetLayers";
 
@@ -49,7 +49,7 @@ export function sheetOf(
     says,
     name: construction.name,
     layers: sheetLayersOf(construction),
-    loss: toOutLoss(loss),
+    loss: toOutSpectrum(loss),
     bases: [...bases],
     doubts: bases.map(elementDeviation),
     surfaceMass,
@@ -59,14 +59,4 @@ export function sheetOf(
     joints: construction.layers.flatMap((layer) => (layer.kind === "cavity" ? [layer.connection] : [])),
     provenance: construction.provenance,
   };
-}
-
-/** Losses as they leave the core: NaN is unknown, and what lets nothing pass is silent. */
-export function toOutLoss(losses: ArrayLike<number>): OutSpectrum {
-  return Array.from(losses, wordOf);
-}
-
-function wordOf(loss: number): Out {
-  if (Number.isNaN(loss)) return "unknown";
-  return loss === Infinity ? "silent" : loss;
 }

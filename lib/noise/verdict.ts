@@ -16,6 +16,7 @@ export function toOut(value: number): Out {
   return Number.isFinite(value) ? value + 0 : "silent"; // -0 would not survive JSON
 }
 
+/** Levels, losses or margins over the bands on their way out, dB; areas in m2 and times in s as well. */
 export function toOutSpectrum(values: ArrayLike<number>): OutSpectrum {
   const spectrum: OutSpectrum = [];
   for (let band = 0; band < values.length; band += 1) spectrum.push(toOut(values[band]));
@@ -147,7 +148,13 @@ export interface ReceiverVerdict {
   /** Power sum of the contributions left out of `contributions` on the wire; null when none is. */
   rest: OutSpectrum | null;
   /** Parts of the doubt at the leading band, dB, largest first; they add as squares. */
-  doubts: { what: "source" | "leaving" | "entering" | "outdoors"; partId: string | null; name: string; basis: string; decibels: number }[];
+  doubts: {
+    what: "source" | "leaving" | "entering" | "outdoors";
+    partId: string | null;
+    name: string;
+    basis: string;
+    decibels: number;
+  }[];
   facts: SentenceFacts;
   crossCut: CrossCut | null;
 }

@@ -1,14 +1,14 @@
 import { z } from "zod";
 import table from "../../data/weightings.json";
-import { BAND_COUNT, OCTAVE_BANDS } from "./bands";
+import { BAND_COUNT } from "./bands";
 import { energyOf, levelOf } from "./levels";
-import { provenanceSchema } from "./spectrum";
+import { bandsSchema, provenanceSchema } from "./spectrum";
 
 const weightingSchema = z.strictObject({
   key: z.enum(["A", "C"]),
   label: z.string(),
   unit: z.literal("dB"),
-  bands: z.array(z.number()).refine((bands) => bands.every((band, i) => band === OCTAVE_BANDS[i])),
+  bands: bandsSchema,
   values: z.array(z.number()).length(BAND_COUNT),
   provenance: provenanceSchema,
 });
@@ -39,5 +39,7 @@ export function weightedLevel(levels: ArrayLike<number>, weighting: Weighting): 
   return levelOf(energy);
 }
 
+/** A-weighted total of nine octave levels, dB (IEC 61672-1). */
 export const aWeighted = (levels: ArrayLike<number>): number => weightedLevel(levels, "A");
+/** C-weighted total of nine octave levels, dB (IEC 61672-1). */
 export const cWeighted = (levels: ArrayLike<number>): number => weightedLevel(levels, "C");

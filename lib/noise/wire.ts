@@ -45,7 +45,7 @@ function gathered(paths: readonly PathVerdict[], { bands, weighted }: ReceiverVe
   );
   const without = (level: Out, part: number): Out =>
     typeof level === "number" && part < 1
-      ? level + 10 * Math.log10(1 - part)
+      ? level + levelOf(1 - part)
       : level === "unknown"
         ? level
         : "silent";

@@ -10,10 +10,11 @@ export interface BenchSize {
 
 const PROVENANCE = { document: "generated for the bench", clause: "", memory: false };
 const bases = Array.from({ length: BAND_COUNT }, () => "laboratory");
-const levels = (at: number, step: number) =>
+/** Nine figures, each a step above the one before. */
+const rising = (at: number, step: number) =>
   Array.from({ length: BAND_COUNT }, (_, band) => at + step * band);
 
-/** Houses on a grid 14 m apart, one room each, faces on all four sides and roofs; a fence between two rows. */
+/** Houses stand on a grid 14 m apart. */
 function centreOf(room: number): [number, number] {
   return [14 * (room % 4), 14 * Math.floor(room / 4)];
 }
@@ -60,71 +61,93 @@ function constructionOf(i: number) {
     layers: [],
     size: null,
     use: null,
-    tl: levels(18 + 2 * i, 3),
+    tl: rising(18 + 2 * i, 3),
     bases,
     description: null,
     provenance: PROVENANCE,
   };
 }
 
-/** A plan of any size for timing: all figures made up, all parts present. */
+const LOT = {
+  id: "lot",
+  outline: null,
+  ground: [0.5, 0.5, 0.5],
+  temperature: 10,
+  humidity: 70,
+  indoorTemperature: 20,
+  indoorHumidity: 50,
+};
+
+function spaceOf(r: number) {
+  const area = rising(8, 1);
+  return {
+    id: `r${r}`,
+    buildingId: `b${r}`,
+    name: `room ${r}`,
+    volume: 45,
+    box: null,
+    absorption: { kind: "area", area },
+  };
+}
+
+function sourceOf(s: number, rooms: number) {
+  return {
+    id: `s${s}`,
+    name: `source ${s}`,
+    kind: "instrument",
+    params: {},
+    spaceId: `r${s % rooms}`,
+    position: null,
+    power: rising(100 - s, -1),
+    deviation: null,
+    basis: "measured",
+    provenance: PROVENANCE,
+  };
+}
+
+function receiverOf(l: number, rooms: number) {
+  return {
+    id: `l${l}`,
+    name: `listener ${l}`,
+    kind: "room",
+    spaceId: `r${(rooms - 1 - l) % rooms}`,
+    position: null,
+  };
+}
+
+function criterionOf(l: number) {
+  return {
+    id: `k${l}`,
+    receiverId: `l${l}`,
+    name: "curve",
+    metric: "curve",
+    value: null,
+    levels: rising(50, -4),
+    hours: null,
+    provenance: PROVENANCE,
+  };
+}
+
+/**
+ * A plan of any size for timing, all figures made up: houses of one room each with faces on four sides and roofs, and a
+ * fence between two rows.
+ */
 export function buildBenchPlan({ rooms, perRoom, sources, receivers }: BenchSize): Plan {
   const list = <T>(count: number, of: (i: number) => T) => Array.from({ length: count }, (_, i) => of(i));
   return planSchema.parse({
-    lot: {
-      id: "lot",
-      outline: null,
-      ground: [0.5, 0.5, 0.5],
-      temperature: 10,
-      humidity: 70,
-      indoorTemperature: 20,
-      indoorHumidity: 50,
-    },
+    lot: LOT,
     buildings: [],
-    spaces: list(rooms, (r) => ({
-      id: `r${r}`,
-      buildingId: `b${r}`,
-      name: `room ${r}`,
-      volume: 45,
-      box: null,
-      absorption: { kind: "area", area: list(BAND_COUNT, (band) => 8 + band) },
-    })),
+    spaces: list(rooms, spaceOf),
     surfaces: [],
-    sources: list(sources, (s) => ({
-      id: `s${s}`,
-      name: `source ${s}`,
-      kind: "instrument",
-      params: {},
-      spaceId: `r${s % rooms}`,
-      position: null,
-      power: levels(100 - s, -1),
-      deviation: null,
-      basis: "measured",
-      provenance: PROVENANCE,
-    })),
+    sources: list(sources, (s) => sourceOf(s, rooms)),
     outlets: [],
     incidences: [],
     paths: list(rooms, (r) => ({ id: `p${r}`, fromSpaceId: `r${r}`, toSpaceId: null, name: `shell ${r}` })),
     constructions: list(10, constructionOf),
     elements: list(rooms * perRoom, (i) => elementOf(Math.floor(i / perRoom), i % perRoom)),
     fences: [{ id: "f", name: "fence", p1: [-50, 7], p2: [80, 7], height: 1.8 }],
-    receivers: list(receivers, (l) => ({
-      id: `l${l}`,
-      name: `listener ${l}`,
-      kind: "room",
-      spaceId: `r${(rooms - 1 - l) % rooms}`,
-      position: null,
-    })),
-    criteria: list(receivers, (l) => ({
-      id: `k${l}`,
-      receiverId: `l${l}`,
-      name: "curve",
-      metric: "curve",
-      value: null,
-      levels: levels(50, -4),
-      hours: null,
-      provenance: PROVENANCE,
-    })),
+    receivers: list(receivers, (l) => receiverOf(l, rooms)),
+    criteria: list(receivers, criterionOf),
     situations: [],
   });
 }

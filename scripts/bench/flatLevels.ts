@@ -54,7 +54,8 @@ export function flatInput(plan: Plan): FlatInput {
 
 /**
  * The arithmetic of a whole solve in one flat function, written apart from the solver as its yardstick: levels of every
- * receiver, [receiver * bands + band], and levels of every way out, [(receiver * faces + face) * bands + band].
+ * receiver, [receiver * bands + band], and levels of every way out, [(receiver * faces + face) * bands + band]. Long on
+ * purpose: a yardstick that was split up would pay for the same calls as the solver.
  */
 export function flatLevels(input: FlatInput): { levels: Float64Array; ways: Float64Array } {
   const { rooms, faces, sources, receivers, room, at, normal, roof, area, loss, absorption, power } = input;

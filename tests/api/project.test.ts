@@ -44,6 +44,7 @@ describe("a yard", () => {
     const refused = await ask(CHANGE, { ...asked, revision });
     expect([refused.status, Object.keys((await refused.json()) as object)]).toEqual([409, ["error"]]);
     expect((await ask(GET, { cookie: stage.cookies.owner, params })).status).toBe(200);
+    for (const body of [{ name: "Elsewhere" }, { says: "Flutes" }, { name: "Elsewhere", archived: true }]) expect((await rename(body)).status).toBe(409);
     expect((await rename({ archived: false })).status).toBe(200);
     expect((await ask(CHANGE, { ...asked, revision: revision + 1 })).status).toBe(200);
   });

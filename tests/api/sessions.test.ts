@@ -61,6 +61,17 @@ describe("replayed cookies", () => {
     expect((await open(cookie)).status).toBe(401);
   });
 
+  it("signed out a moment after a new id was given: neither id holds, whichever signs out", async () => {
+    for (const leaver of ["old", "new"] as const) {
+      const { cookie, idHash } = await buildSession(stage.users.client, true);
+      await age(idHash, { issuedAt: "25 hours", beganAt: "25 hours" });
+      const renewed = cookieIn(await open(cookie));
+      const other = await buildSession(stage.users.client, true);
+      await ask(DELETE, { method: "DELETE", cookie: leaver === "old" ? cookie : renewed });
+      expect([(await open(cookie)).status, (await open(renewed)).status, (await open(other.cookie)).status]).toEqual([401, 401, 200]);
+    }
+  });
+
   it("sealed with another key", async () => {
     const { id } = await buildSession(stage.users.client);
     const seal = await sealData({ id }, { password: { 1: randomBytes(32).toString("base64url") }, ttl: 0 });
@@ -139,6 +150,17 @@ describe("a new id", () => {
   });
 });
 
+it("an id that was replaced goes before any that holds", async () => {
+  const user = await buildUser({ email: "replaced@stillyard.example", passwordHash: await hashPassword(PASSWORD) });
+  const sessions = [];
+  for (let count = 0; count < 10; count += 1) sessions.push(await buildSession(user));
+  await age(sessions[2]!.idHash, { seenAt: "2 hours" });
+  await age(sessions[7]!.idHash, { replacedAt: "30 seconds" });
+  await ask(POST, { method: "POST", body: { email: user.email, password: PASSWORD } });
+  expect(await Session.findByPk(sessions[7]!.idHash)).toBeNull();
+  expect(await Session.findByPk(sessions[2]!.idHash)).not.toBeNull();
+});
+
 describe("signing in", () => {
   const tryOf = async (email: string, password: string) => {
     const answer = await ask(POST, { method: "POST", body: { email, password } });
@@ -164,6 +186,19 @@ describe("signing in", () => {
     }
     // Without the work an unknown address would be answered in a few milliseconds.
     expect(Math.min(...times.unknown)).toBeGreaterThan(Math.min(...times.known) / 2);
+  });
+
+  it("a hash of older, lesser cost is made anew with the password that fits, and with no other", async () => {
+    const older = await hashPassword(PASSWORD, 10);
+    const user = await buildUser({ email: "older@stillyard.example", passwordHash: older });
+    await tryOf(user.email, "not this one at all");
+    expect((await user.reload()).passwordHash).toBe(older);
+    const enter = () => ask(POST, { method: "POST", body: { email: user.email, password: PASSWORD } });
+    expect((await enter()).status).toBe(200);
+    const { passwordHash } = await user.reload();
+    expect(passwordHash).toMatch(/^\$2[aby]\$12\$/);
+    expect((await enter()).status).toBe(200);
+    expect((await user.reload()).passwordHash).toBe(passwordHash);
   });
 
   it("passwords that differ only after their 72nd byte are different", async () => {

@@ -7,7 +7,7 @@ const answer = (revision: number) => ({ revision, plan: {}, verdict: {} }) as An
 const touched = (id: string) => ({ kind: "element", id, act: "change", before: {}, after: {} });
 const stale = (revision: number, ...ids: string[]) => ({
   status: 409,
-  body: { error: { message: "Tobi changed this yard in the meantime." }, current: answer(revision), changedBy: { name: "Tobi", at: "2026-12-01T20:00:00.000Z", parts: ids.map(touched) } },
+  body: { error: { message: "Tobi changed this yard in the meantime." }, current: answer(revision), changedBy: { name: "Tobi", at: "2026-12-01T20:00:00.000Z", whole: true, parts: ids.map(touched) } },
 });
 
 /** A server that gives these answers, one after the other, and keeps what it was asked. */
@@ -42,6 +42,13 @@ describe("saving a part", () => {
   it("is not sent again over somebody's change of the same part", async () => {
     const asked = serve(stale(7, "roof", "door"));
     expect(await savePart(door)).toMatchObject({ kind: "stale", current: answer(7), changedBy: { name: "Tobi" } });
+    expect(asked).toHaveLength(1);
+  });
+
+  it("is not sent again where more was changed than the answer names", async () => {
+    const { status, body } = stale(307, "roof");
+    const asked = serve({ status, body: { ...body, changedBy: { ...body.changedBy, whole: false } } });
+    expect(await savePart(door)).toMatchObject({ kind: "stale", current: answer(307) });
     expect(asked).toHaveLength(1);
   });
 

@@ -5,6 +5,7 @@ import { bandRangeWords, lowestIsWorse } from "@/components/verdict/notesWords";
 import { readingOf } from "@/components/verdict/reading";
 import { slabWordsOf, type SlabWords } from "@/components/verdict/sentence";
 import { dellEndAnswer, plumtreeAnswer, readPlumtree } from "./fixtures/answers";
+import { buildAnswer, planWith } from "./fixtures/wallsAnswer";
 import { buildNo9, buildReceiver, buildVerdict, no9Lowered, no9Wanted } from "./fixtures/demoVerdict";
 
 const plain = (text: string) => text.replaceAll("\u00a0", " ");
@@ -32,6 +33,13 @@ describe("the sentence of a verdict", () => {
     expect(all(words)).toContain("Under the limit does not mean unheard.");
   });
 
+  it("says at least, and where, when a part that nobody has measured could add to it", () => {
+    const hollow = buildAnswer({ plan: planWith("yard-door", "door-hollow-44") });
+    const words = slabWordsOf(readPlumtree(hollow.verdict));
+    expect(plain(words.figure)).toMatch(/^at least \d+ dB over$/);
+    expect(all(words)).toContain("Not known in full at 63 Hz and 8 kHz: there it may be more.");
+  });
+
   it("leaves out give or take where the excess is beyond the doubt", () => {
     const words = wordsOf(no9Lowered(-9));
     expect(sentence(words)).not.toContain("give or take");
@@ -45,11 +53,20 @@ describe("the sentence of a verdict", () => {
     expect(all(words)).toContain("it leaves by the yard door. With the yard door silent you would be under.");
   });
 
+  it("promises nothing of one path's silence while another band stays over", () => {
+    const [roof, door] = no9Wanted.paths;
+    const shrill = { ...door!, levels: door!.levels.map((level, index) => level! + (index === 6 ? 30 : 0)) };
+    const words = all(wordsOf(buildNo9({ paths: [roof!, shrill] })));
+    expect(words).toContain("at 2 kHz");
+    expect(words).toContain("Silence the yard door alone and you are still over, at 63 Hz.");
+    expect(words).not.toContain("you would be under");
+  });
+
   it("speaks of a limit in dB(A) as of the whole", () => {
     const reading = readingOf(dellEndAnswer.plan, dellEndAnswer.verdict, null)!;
     const words = slabWordsOf(reading);
     expect(all(words)).toContain("The limit is 30 dB(A) for the whole.");
-    expect(all(words)).toContain("Most of it lies at 500 Hz");
+    expect(all(words)).toContain("The largest part of the sound lies at 500 Hz");
     expect(all(words)).not.toContain("nearest to the limit");
   });
 

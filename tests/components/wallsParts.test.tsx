@@ -46,9 +46,9 @@ describe("labels that avoid each other", () => {
 });
 
 describe("words and units", () => {
-  it("tell how far a margin moved in whole decibels", () => {
-    expect(movementWords(2.4)).toBe("2\u00a0dB better than before");
-    expect(movementWords(-0.3)).toBe("less than 1\u00a0dB worse than before");
+  it("tell how far a margin moved to a tenth of a decibel", () => {
+    expect(movementWords(2.4)).toBe("2.4\u00a0dB better than before");
+    expect(movementWords(-0.3)).toBe("0.3\u00a0dB worse than before");
     expect(movementWords(0)).toBe("as before");
   });
 
@@ -71,8 +71,12 @@ describe("words and units", () => {
 
   it("say what the bands rest on", () => {
     const bases: Basis[] = ["estimated", ...Array<Basis>(8).fill("calculated")];
-    expect(basisSentence(bases, [7, 5, 5, 4, 4, 4, 4, 4, 6], 1)).toBe(
+    const doubts = [7, 5, 5, 4, 4, 4, 4, 4, 6];
+    expect(basisSentence({ loss: Array(9).fill(20), bases, doubts }, 1)).toBe(
       "Estimated at 31.5\u00a0Hz, calculated from 63\u00a0Hz up; give or take 5\u00a0dB at 63\u00a0Hz.",
+    );
+    expect(basisSentence({ loss: ["unknown", "unknown", ...Array(7).fill(20)], bases, doubts }, 1)).toBe(
+      "Unknown from 31.5\u00a0Hz to 63\u00a0Hz, calculated from 125\u00a0Hz up.",
     );
   });
 });

@@ -1,6 +1,8 @@
 import { describe, expect, test } from "vitest";
+import { limitLevels } from "../../lib/noise/criteria";
+import { effectiveLoss } from "../../lib/noise/effective";
 import { describeLayers, massOf } from "../../lib/noise/layers";
-import { materialNames } from "../../lib/noise/materials";
+import { findMaterial } from "../../lib/noise/materials";
 import { sourceKinds } from "../../lib/noise/sources";
 import { library, read } from "./records";
 
@@ -34,12 +36,22 @@ describe("constructions", () => {
       expect(record.tl === null).toBe(record.bases === null);
       expect(record.tl !== null || record.layers.length > 0).toBe(true);
       for (const layer of record.layers) {
-        if (layer.kind === "board") expect(materialNames).toContain(layer.material);
+        if (layer.kind === "board") expect(findMaterial(layer.material), layer.material).toBeDefined();
         if (layer.kind === "cavity") expect(layer.fill).toBeLessThanOrEqual(layer.thickness);
       }
       if (record.layers.length > 0) expect(describeLayers({ ...record, id: key })).not.toBeNull();
     },
   );
+
+  test("each let a known energy pass from 125 Hz to 4 kHz", () => {
+    for (const record of constructions) {
+      const { loss } = effectiveLoss({ ...record, id: record.key });
+      expect(
+        Array.from(loss.slice(2, 8)).filter((each) => !Number.isFinite(each)),
+        record.key,
+      ).toEqual([]);
+    }
+  });
 
   test("call a band without a printed figure estimated, never laboratory", () => {
     for (const { tl, bases } of constructions) {
@@ -109,6 +121,13 @@ describe("criteria", () => {
       if (record.metric === "NC") expect(nameOfEditions()).toContain(record.edition);
     },
   );
+
+  test("of NC can be read as a curve in every band", () => {
+    const curves = criteria.filter(({ metric }) => metric === "NC");
+    expect(curves.length).toBeGreaterThan(0);
+    for (const { key: id, says: _, ...record } of curves)
+      expect(limitLevels({ ...record, id, receiverId: "r" }).every(Number.isFinite), id).toBe(true);
+  });
 
   test("hold the demo's limit in bed as it was agreed", () => {
     expect(criteria.find(({ key }) => key === "demo-no9-night")?.levels).toEqual([

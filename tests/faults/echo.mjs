@@ -1,11 +1,12 @@
 import { setTimeout as sleep } from "node:timers/promises";
 import { endOnSignal, openServer } from "../../scripts/serve.mjs";
 
-/** The product's server around a handler that says what arrived: /slow takes a second, /never does not answer. */
+/** The product's server around a handler that says what arrived: /slow takes a second, /never does not answer, /own has headers of its own. */
 async function handler(request, response) {
   if (request.url === "/fault") throw new Error("a fault of the handler");
   if (request.url === "/never") return;
   if (request.url === "/slow") await sleep(1_000);
+  if (request.url === "/own") response.setHeader("Content-Security-Policy", "script-src 'self'").setHeader("Cache-Control", "public");
   response.setHeader("Content-Type", "application/json");
   response.end(JSON.stringify({ headers: request.headers, raw: request.rawHeaders }));
 }

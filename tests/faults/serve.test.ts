@@ -1,5 +1,6 @@
 import { type ChildProcess, fork } from "node:child_process";
 import { once } from "node:events";
+import { connect } from "node:net";
 import { request as send, type IncomingHttpHeaders, Agent } from "node:http";
 import { afterEach, describe, expect, it } from "vitest";
 
@@ -25,9 +26,9 @@ async function openEcho(environment: Record<string, string> = {}) {
   return { child, port };
 }
 
-function ask(port: number, path: string, headers: Record<string, string> = {}, agent?: Agent): Promise<Answer> {
+function ask(port: number, path: string, headers: Record<string, string> = {}, agent?: Agent, method = "GET"): Promise<Answer> {
   return new Promise((resolve, reject) => {
-    const asked = send({ host: "127.0.0.1", port, path, headers, agent }, async (response) => {
+    const asked = send({ host: "127.0.0.1", port, path, headers, agent, method }, async (response) => {
       let text = "";
       for await (const piece of response) text += piece;
       resolve({ status: response.statusCode ?? 0, headers: response.headers, text });
@@ -77,7 +78,55 @@ describe("sizes and times", () => {
   });
 });
 
+/** What comes back on a bare socket until the server ends it; what is sent after that finds nobody. */
+function converse(port: number, text: string): Promise<string> {
+  return new Promise((resolve, reject) => {
+    let heard = "";
+    const socket = connect({ host: "127.0.0.1", port, allowHalfOpen: true }, () => socket.write(text));
+    socket.on("data", (piece) => (heard += piece));
+    // Our own half stays open and speaks on until there is nobody left to hear it.
+    const speaking = setInterval(() => socket.write("."), 200);
+    socket.on("error", ({ code }: NodeJS.ErrnoException) => (code === "ECONNRESET" || code === "EPIPE" ? resolve(heard) : reject(new Error(code))));
+    socket.on("close", () => clearInterval(speaking));
+  });
+}
+
+describe("requests that nobody behind has to read", () => {
+  it.each([["/%E0%A4%A"], ["/%"], ["http://elsewhere.example/projects"], ["*"]])("the address %s is a 400 in words", async (path) => {
+    const { port } = await openEcho();
+    const answer = await ask(port, path);
+    expect([answer.status, answer.text]).toEqual([400, "This request could not be read.\n"]);
+    expect(answer.headers).toMatchObject(everywhere);
+  });
+
+  it("a query may hold what is no text", async () => {
+    const { port } = await openEcho();
+    expect((await ask(port, "/?next=%E0%A4%A")).status).toBe(200);
+  });
+
+  it("a method that is none of ours is a 405", async () => {
+    const { port } = await openEcho();
+    expect((await ask(port, "/", {}, undefined, "TRACE")).status).toBe(405);
+    expect((await ask(port, "/", {}, undefined, "PROPFIND")).status).toBe(405);
+  });
+
+  it("a socket that would become a channel is refused and closed, though the other side holds it open", async () => {
+    const { port } = await openEcho();
+    const heard = await converse(port, "GET / HTTP/1.1\r\nHost: localhost\r\nConnection: Upgrade\r\nUpgrade: websocket\r\n\r\n");
+    expect(heard).toMatch(/^HTTP\/1\.1 400 /);
+  });
+});
+
 describe("headers", () => {
+  it("an answer that says nothing of its own may run nothing and is kept nowhere; one that does is left alone", async () => {
+    const { port } = await openEcho();
+    expect((await ask(port, "/")).headers).toMatchObject({
+      "content-security-policy": "default-src 'none'; frame-ancestors 'none'",
+      "cache-control": "private, no-store",
+    });
+    expect((await ask(port, "/own")).headers).toMatchObject({ "content-security-policy": "script-src 'self'", "cache-control": "public" });
+  });
+
   it("every answer carries them: served, refused, and refused before it was read", async () => {
     const { port } = await openEcho({ ANSWER_WITHIN: "300" });
     const refused = [

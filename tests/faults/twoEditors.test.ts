@@ -14,7 +14,7 @@ beforeAll(async () => {
 interface StaleAnswer {
   error: { code: string; message: string };
   current: Answer;
-  changedBy: { name: string; at: string; parts: { kind: string; id: string; act: string; before: object; after: object }[] };
+  changedBy: { name: string; at: string; whole: boolean; parts: { kind: string; id: string; act: string; before: object; after: object }[] };
 }
 
 const open = async () => (await (await ask(GET, { cookie: stage.cookies.owner, params: { projectId: stage.project.id } })).json()) as Answer;
@@ -60,6 +60,16 @@ describe("two editors", () => {
     expect(changedBy.parts.map(({ id }) => id)).toEqual([stage.idOf("yard-door")]);
     const again = (await (await change("east-wall", { area: 9 }, current.revision)).json()) as Answer;
     expect([elementOf(again, "yard-door").area, elementOf(again, "east-wall").area]).toEqual([2.2, 9]);
+  });
+
+  it("who is more than a hundred changes behind is told that not all of them are named", async () => {
+    const start = await open();
+    let { revision } = start;
+    for (let count = 0; count < 101; count += 1, revision += 1) await change("yard-door", { area: 3 + count / 100 }, revision);
+    const changedSince = async (made: number) => ((await (await change("yard-door", { area: 1 }, made)).json()) as StaleAnswer).changedBy;
+    expect(await changedSince(start.revision)).toMatchObject({ whole: false });
+    expect(await changedSince(start.revision + 1)).toMatchObject({ whole: true });
+    await change("yard-door", { area: 2.2 }, revision);
   });
 
   it("each change leaves who, in which role, and the part before and after", async () => {

@@ -147,10 +147,17 @@ describe("an element whole", () => {
       params: { openArea: 0.25 },
       ...change,
     });
+  test("refuses an opening larger than the whole, beside the field that says so", () => {
+    expect(() => element({ params: { openArea: 1.3 } })).toThrow(/larger than the whole/);
+    expect(() => element({ kind: "door", area: 1.9, params: { gapArea: 0.99 } })).not.toThrow();
+    expect(() => element({ kind: "door", area: 0.5, params: { gapArea: 0.99 } })).toThrow(/gapArea/);
+  });
   const loss = effectiveLoss(build(wall));
+  const even = effectiveLoss(build([], { tl: new Array(9).fill(40) }));
   test("lets its open part pass beside its glass", () => {
-    const { passing } = passingOfElement(element({}), loss);
-    expect(passing[4]).toBeCloseTo(0.25 + 1.2 * 10 ** (-loss.loss[4] / 10), 12);
+    // 1.2 m² of 40 dB are as an opening of 1.2 cm².
+    const { passing } = passingOfElement(element({}), even);
+    expect(passing[4]).toBeCloseTo(0.25012, 12);
   });
   test("rests on its open part where nearly all passes there", () => {
     const { bases, deviations } = passingOfElement(element({}), loss);
@@ -164,7 +171,8 @@ describe("an element whole", () => {
     expect(unknown).toBe(511);
   });
   test("has the field limit of its building beside it", () => {
-    const limited = passingOfElement(element({ limit: 50, params: { openArea: 0 } }), loss).passing[4];
-    expect(limited).toBeCloseTo(1.2 * (10 ** -5 + 10 ** (-loss.loss[4] / 10)), 12);
+    // 1.2 cm² for the 40 dB and a tenth of that for the 50 dB.
+    const limited = passingOfElement(element({ limit: 50, params: { openArea: 0 } }), even).passing[4];
+    expect(limited).toBeCloseTo(1.32e-4, 12);
   });
 });

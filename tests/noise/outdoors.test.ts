@@ -3,7 +3,7 @@ import { exactMidband, OCTAVE_BANDS } from "../../lib/noise/bands";
 import { levelOf, sumLevels } from "../../lib/noise/levels";
 import { airAttenuation, airAttenuations } from "../../lib/noise/outdoors/air";
 import { detourOver, largestDetour, screening, type Screen } from "../../lib/noise/outdoors/barrier";
-import { cutTowards, isBehind, partsOf, type Face } from "../../lib/noise/outdoors/face";
+import { centresOf, cutTowards, isBehind, liesFlat, type Face } from "../../lib/noise/outdoors/face";
 import { groundAttenuation, groundShape } from "../../lib/noise/outdoors/ground";
 import { addRay, endAt, type Yard } from "../../lib/noise/outdoors/ray";
 import { aWeighted } from "../../lib/noise/weighting";
@@ -210,7 +210,7 @@ describe("a screen", () => {
 });
 
 describe("a face", () => {
-  const face: Face = { at: [0, 0, 1.5], normal: [1, 0, 0], size: [4, 2.4], isRoof: false };
+  const face: Face = { at: [0, 0, 1.5], normal: [1, 0, 0], size: [4, 2.4], likeRoof: false };
   test("is one part from twice its longest side on", () => {
     expect(cutTowards(face, [8, 0, 1.5])).toEqual([1, 1]);
     expect(cutTowards(face, [7.9, 0, 1.5])).toEqual([2, 1]);
@@ -218,7 +218,7 @@ describe("a face", () => {
     expect(cutTowards({ ...face, size: [40, 30] }, [1, 0, 1.5])).toEqual([12, 12]);
   });
   test("has parts across and up, in its plane", () => {
-    expect(partsOf(face, [2, 2])).toEqual(
+    expect(centresOf(face, [2, 2])).toEqual(
       expect.arrayContaining(
         [
           [0, 1, 0.9],
@@ -226,8 +226,8 @@ describe("a face", () => {
         ].map((at) => at.map((x) => expect.closeTo(x, 9))),
       ),
     );
-    const roof: Face = { at: [0, 0, 3], normal: [0, 0, 1], size: [4, 2], isRoof: true };
-    expect(partsOf(roof, [2, 1])).toEqual([
+    const roof: Face = { at: [0, 0, 3], normal: [0, 0, 1], size: [4, 2], likeRoof: true };
+    expect(centresOf(roof, [2, 1])).toEqual([
       [-1, 0, 3],
       [1, 0, 3],
     ]);
@@ -235,6 +235,16 @@ describe("a face", () => {
   test("has a front that holds its plane, and a roof has no back", () => {
     expect(isBehind(face, [0, 3, 1])).toBe(false);
     expect(isBehind(face, [-0.1, 3, 1])).toBe(true);
-    expect(isBehind({ ...face, isRoof: true }, [-0.1, 3, 1])).toBe(false);
+    expect(isBehind({ ...face, likeRoof: true }, [-0.1, 3, 1])).toBe(false);
+  });
+  test("lies flat from more than 45 degrees of lean on, looking up or down", () => {
+    const leans = [
+      [0, 0, 1],
+      [0, 0, -1],
+      [0.5, 0.5, 0.8],
+      [0.6, 0.6, 0.8],
+      [0, 1, 0],
+    ] as const;
+    expect(leans.map(liesFlat)).toEqual([true, true, true, false, false]);
   });
 });

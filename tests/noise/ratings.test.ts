@@ -1,7 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { limitLevels, ncLevels, ncOf, NC_EDITIONS, nrLevels, nrOf } from "../../lib/noise/criteria";
 import { sumLevels } from "../../lib/noise/levels";
-import { octaveLevels, octaveLoss } from "../../lib/noise/thirds";
 import { aWeighted, cWeighted, WEIGHTS } from "../../lib/noise/weighting";
 import budget from "./truth/budget.json";
 import truth from "./truth/ratings.json";
@@ -110,10 +109,5 @@ describe("sums", () => {
     expect(sumLevels([])).toBe(-Infinity);
     expect(sumLevels([50, NaN])).toBeNaN();
   });
-  test("thirds become octaves: levels by sum, losses by the mean of what passes", () => {
-    expect(octaveLevels([50, 50, 50])[0]).toBeCloseTo(54.7712, 4);
-    expect(octaveLoss([30, 30, 30])[0]).toBeCloseTo(30, 9);
-    expect(octaveLoss([20, 40, 40])[0]).toBeCloseTo(24.6852, 3);
-    expect(() => octaveLevels([1, 2])).toThrow(RangeError);
-  });
+  test("three equal parts are 4.77 dB louder", () => expect(sumLevels([50, 50, 50])).toBeCloseTo(54.7712, 4));
 });

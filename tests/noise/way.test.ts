@@ -53,6 +53,7 @@ describe("small rules of the way", () => {
   test("a field limit counts as a parallel way", () => {
     const limited = { ...wall, limit: 40 };
     expect(level({ elements: [limited, window] }) - level({})).toBeCloseTo(3.0103, 2);
+    expect(level({ elements: [{ ...wall, limit: 110 }, window] })).toBeCloseTo(level({}), 4);
   });
   test("cutting a large face near by changes little on its axis and the parts keep its power", () => {
     const cut = { ...wall, size: [4.4, 2.5] };

@@ -1,5 +1,5 @@
 import { BAND_COUNT } from "../bands";
-import { addEnergy, levelOf, noEnergy } from "../levels";
+import { addEnergy, energyOf, levelOf, noEnergy, weightedSum } from "../levels";
 import type { ElementModel } from "../model/elementModels";
 import { hasBand, type BandMask } from "../model/masks";
 import type { SourceModel } from "../model/sourceModels";
@@ -160,13 +160,7 @@ function opened({ field, weighing: { hearing, playing }, spread }: Reckoning, bu
 /** Energy counted where the listener is weighed: bands against their limits, else weighted. */
 function allowances({ bands, total }: Weighing): Float64Array {
   if (total) return total.factors;
-  return Float64Array.from(bands, ({ limit }) => (Number.isNaN(limit) ? 1e-12 : 10 ** (-limit / 10)));
-}
-
-function rank(energy: Float64Array, factors: Float64Array): number {
-  let sum = 0;
-  for (let band = 0; band < BAND_COUNT; band += 1) sum += energy[band] * factors[band];
-  return sum;
+  return Float64Array.from(bands, ({ limit }) => (Number.isNaN(limit) ? 1e-12 : energyOf(-limit)));
 }
 
 /** Where a source might sound at all; elsewhere an unknown element has nothing to pass. */
@@ -213,7 +207,7 @@ export function contributionsOf(reckoning: Reckoning, most: number): Contributio
     .flatMap((source) => bundlesOf(reckoning, source))
     .map(masked)
     .filter(matters);
-  bundles.sort((a, b) => rank(b.energy, factors) - rank(a.energy, factors));
+  bundles.sort((a, b) => weightedSum(b.energy, factors) - weightedSum(a.energy, factors));
   const rest = noEnergy();
   let closed = 0;
   for (const bundle of bundles) {
@@ -223,7 +217,7 @@ export function contributionsOf(reckoning: Reckoning, most: number): Contributio
       closed += 1;
     }
   }
-  const ranked = shares.filter(matters).map((share) => ({ share, rank: rank(share.energy, factors) }));
+  const ranked = shares.filter(matters).map((share) => ({ share, rank: weightedSum(share.energy, factors) }));
   ranked.sort((a, b) => b.rank - a.rank);
   return {
     contributions: ranked.map(({ share }) => toContribution(share)),

@@ -1,5 +1,5 @@
 import { BAND_COUNT } from "../bands";
-import { addEnergy, levelOf } from "../levels";
+import { addEnergy, levelOf, weightedSum } from "../levels";
 import { hasBand, maskWhere, NO_BANDS, type BandMask } from "../model/masks";
 import type { Part } from "../sound/parts";
 import { toOut, type PathVerdict } from "../verdict";
@@ -44,12 +44,6 @@ export function rankOf(
 ): number {
   if (total) return weightedSum(energy, total.factors);
   return leading < 0 ? 0 : energy[leading];
-}
-
-function weightedSum(energy: Float64Array, factors: Float64Array): number {
-  let sum = 0;
-  for (let band = 0; band < BAND_COUNT; band += 1) sum += factors[band] * energy[band];
-  return sum;
 }
 
 /** Bands in which a way's own figure is not known. */
@@ -104,6 +98,7 @@ function bandsOf(
   return rows;
 }
 
+/** A way as the reader sees it: level in dB, share, and level without it, band by band and of the weighted total. */
 export function pathVerdict(weighing: Weighing, way: Way): PathVerdict {
   const [first] = way.parts;
   const isGroup = way.id !== first.id;

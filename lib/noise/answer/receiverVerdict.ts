@@ -1,8 +1,8 @@
 import { OCTAVE_BANDS } from "../bands";
 import { ncOf } from "../criteria";
-import { crossCutOf } from "../crossCut";
-import { doubtParts } from "../doubt";
-import { factsOf } from "../facts";
+import { crossCutOf } from "./crossCut";
+import { doubtParts } from "./doubt";
+import { factsOf } from "./facts";
 import { levelOf } from "../levels";
 import { hasBand } from "../model/masks";
 import type { Field } from "../sound/field";

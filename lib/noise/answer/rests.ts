@@ -1,4 +1,5 @@
 import { FIRST_JUDGED, OCTAVE_BANDS, type Band } from "../bands";
+import { weightedSum } from "../levels";
 import { hasBand } from "../model/masks";
 import { MATTERS } from "../model/passing";
 import type { Part } from "../sound/parts";
@@ -12,7 +13,7 @@ function isEstimated({ element, source, what }: Part, band: number): boolean {
 
 /** Bands of a part that rest on estimates and matter there: a tenth of the energy of a judged band, or of the total. */
 function estimatedBands({ bands, total, energy, metric }: Weighing, part: Part): Band[] {
-  const whole = total ? energy.reduce((sum, each, band) => sum + each * total.factors[band], 0) : 0;
+  const whole = total ? weightedSum(energy, total.factors) : 0;
   return OCTAVE_BANDS.filter((_, band) => {
     if (metric === "none" || !isEstimated(part, band)) return false;
     if (total) return part.energy[band] * total.factors[band] >= MATTERS * whole && whole > 0;

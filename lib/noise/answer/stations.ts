@@ -103,8 +103,8 @@ export function sourceStation(walk: Walk, { source, index, injections, q }: Sour
 
 function frontOf({ element, source }: Part, listener: Place): Place | null {
   if (element?.face) {
-    const { at, normal, isRoof } = element.face;
-    const out: Place | null = normal ?? (isRoof ? [0, 0, 1] : null);
+    const { at, normal, likeRoof } = element.face;
+    const out: Place | null = normal ?? (likeRoof ? [0, 0, 1] : null);
     if (!out) return towards(at, listener);
     const length = Math.hypot(...out) || 1;
     return [at[0] + out[0] / length, at[1] + out[1] / length, at[2] + out[2] / length];
@@ -128,6 +128,7 @@ function sum({ energy }: Part): number {
   return energy.reduce((total, each) => total + each, 0);
 }
 
+/** On the line of a fence, at that place, free field. */
 export function yardStation(walk: Walk, fenceId: string, at: Place): Station {
   return station(walk, "fence", fenceId, at, energyOutdoors(walk, at), unknownIn(walk, YARD));
 }
@@ -151,6 +152,7 @@ export function windowStation(walk: Walk): Station | null {
   return station(walk, "window", loudest.id, field.points[point].end.at, energy, unknownIn(walk, YARD));
 }
 
+/** At the listener: the very levels of the verdict; all unknown for one without a place. */
 export function listenerStation(walk: Walk): Station {
   const { energy, unknown, hearing } = walk.weighing;
   return station(

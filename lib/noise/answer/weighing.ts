@@ -1,7 +1,7 @@
-import { BAND_COUNT, FIRST_JUDGED } from "../bands";
+import { BAND_COUNT, FIRST_JUDGED, OCTAVE_BANDS } from "../bands";
 import { limitLevels } from "../criteria";
-import { doubtsOf, weightedDoubt } from "../doubt";
-import { energyOf, levelOf } from "../levels";
+import { doubtsOf, weightedDoubt } from "./doubt";
+import { energyOf, levelOf, weightedSum } from "../levels";
 import { ALL_BANDS, hasBand, type BandMask } from "../model/masks";
 import type { Criterion } from "../plan";
 import type { Field } from "../sound/field";
@@ -10,7 +10,6 @@ import { partsOf, type Parts } from "../sound/parts";
 import type { Playing } from "../sound/playing";
 import { leadingOf, stateOf, type Weighed } from "../states";
 import { marginOf, toOut, type BandVerdict, type ReceiverVerdict } from "../verdict";
-import { OCTAVE_BANDS } from "../bands";
 import { WEIGHT_FACTORS } from "../weighting";
 
 export interface WeighedBand extends Weighed {
@@ -84,7 +83,7 @@ function weighTotal(
 ): WeighedTotal | null {
   if ((metric !== "dBA" && metric !== "dBC") || value === null) return null;
   const factors = WEIGHT_FACTORS[metric === "dBA" ? "A" : "C"];
-  const known = levelOf(energy.reduce((sum, each, band) => sum + factors[band] * each, 0));
+  const known = levelOf(weightedSum(energy, factors));
   const margin = knownMargin(value, known, unknown !== 0);
   const doubt = weightedDoubt(doubts, energy, factors);
   return {
@@ -156,6 +155,7 @@ function spentOf({ total }: Weighing, { index, limit, known }: WeighedBand): num
   return Number.isNaN(limit) ? null : energyOf(known - limit);
 }
 
+/** The bands of a weighed listener on their way out: levels, limits, margins and doubts in dB. */
 export function bandVerdicts(weighing: Weighing): BandVerdict[] {
   return weighing.bands.map((band) => ({
     band: OCTAVE_BANDS[band.index],
@@ -169,6 +169,7 @@ export function bandVerdicts(weighing: Weighing): BandVerdict[] {
   }));
 }
 
+/** The weighted total on its way out, dB; null where the limit speaks of bands. */
 export function weightedVerdict({ total }: Weighing): ReceiverVerdict["weighted"] {
   if (!total) return null;
   const { known, unknown, limit, margin, doubt } = total;

@@ -66,6 +66,7 @@ function contributionAnswer(
   );
 }
 
+/** The answer of one listener: spectra in dB over `length` bands, with ratings and states. */
 export function answerReceiver(verdict: ReceiverVerdict, length: number): Answer {
   const { bands, contributions, dba, dbc, state } = verdict;
   const levels = bands.map(({ level }) => level);
@@ -82,6 +83,7 @@ export function answerReceiver(verdict: ReceiverVerdict, length: number): Answer
   };
 }
 
+/** The ratings of nine octave levels in dB. */
 export function answerSpectrum(spectrum: Spectrum): Answer {
   const levels = toArithmetic(spectrum);
   return {
@@ -92,8 +94,10 @@ export function answerSpectrum(spectrum: Spectrum): Answer {
   };
 }
 
+/** Third-octaves of an answer begin at 50 Hz; below, the loss is an estimate (solver method 0). */
 const FIRST_PRINTED = THIRD_BANDS.indexOf(50);
 
+/** Transmission loss of a construction, dB: third-octaves from 50 Hz to 10 kHz by their band, octaves from 63 Hz to 8 kHz. */
 export function answerDescription(description: Description): Answer {
   const { third, octave } = transmissionCached(description);
   const printed = THIRD_BANDS.slice(FIRST_PRINTED).map((band, i) => [String(band), third[FIRST_PRINTED + i]]);

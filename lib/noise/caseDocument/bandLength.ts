@@ -3,6 +3,7 @@ import { CaseFault, pathWords, type Key } from "./fault";
 
 const isBandValue = (value: unknown) => typeof value === "number" || value === null || value === "silent";
 
+/** The reason why a spectrum of that many values is refused. */
 export function spectrumLength(length: number): string {
   return `a spectrum has 8 values (63 Hz to 8 kHz) or 9 (from 31.5 Hz); this one has ${length}`;
 }

@@ -12,6 +12,7 @@ export class CaseFault extends Error {
 
 export type Key = string | number | symbol;
 
+/** A place in a document in words: "elements[2].tl". */
 export function pathWords(path: readonly Key[]): string {
   return path.reduce<string>((words, key) => {
     if (typeof key === "number") return `${words}[${key}]`;

@@ -1,7 +1,7 @@
 import { BAND_COUNT } from "../bands";
 import type { Construction } from "../construction";
 import type { PathElement } from "../elements";
-import { planSchema, type Plan, type Space, type Surface } from "../plan";
+import { planSchema, type Plan, type Receiver, type Space, type Surface } from "../plan";
 import { areaFromDecay } from "../rooms";
 import type { Basis } from "../spectrum";
 import { CaseFault, readWith } from "./fault";
@@ -60,7 +60,7 @@ function elementOf(given: Budget["elements"][number], i: number, constructionId:
     id: given.id,
     pathId: `path-${i}`,
     name: given.id,
-    area: given.area ?? given.opening ?? 1,
+    area: given.area ?? given.opening!, // its schema lets no element pass without one of them
     constructionId,
     limit: given.limit ?? null,
     position: given.position ?? null,
@@ -73,7 +73,7 @@ function elementOf(given: Budget["elements"][number], i: number, constructionId:
     return {
       ...placed,
       kind: "duct",
-      params: { opening: given.opening ?? placed.area, run: given.run ?? [] },
+      params: { opening: given.opening!, run: given.run! }, // its schema asks a duct for both
     };
   if (given.kind === "door") return { ...placed, kind: "door", params: { gapArea: 0 } };
   if (given.kind === "window") return { ...placed, kind: "window", params: { openArea: 0 } };
@@ -139,31 +139,37 @@ const LISTS: Record<string, string> = {
   criteria: "receivers",
 };
 
+function lotOf({ options }: Budget): Plan["lot"] {
+  return {
+    id: "lot",
+    street: "",
+    outline: null,
+    ground: options.ground,
+    temperature: options.temperature,
+    humidity: options.humidity,
+    indoorTemperature: options.indoor_temperature,
+    indoorHumidity: options.indoor_humidity,
+    trees: [],
+  };
+}
+
+function spaceOf(room: Budget["rooms"][number]): Space {
+  const { id, building, volume } = room;
+  return { id, buildingId: building, name: id, volume, box: null, absorption: absorptionOf(room) };
+}
+
+function receiverOf({ room, position, criterion: _, ...given }: Budget["receivers"][number]): Receiver {
+  return { ...given, name: given.id, says: "", spaceId: room ?? null, position: position ?? null };
+}
+
 /** The plan of a budget. Throws a `CaseFault` where the bounds of a plan are passed. */
 export function planOfBudget(budget: Budget): Plan {
-  const { options, rooms, elements, fences, receivers } = budget;
+  const { rooms, elements, fences, receivers } = budget;
   const constructions = constructionsOf(budget);
   const plan: Plan = {
-    lot: {
-      id: "lot",
-      street: "",
-      outline: null,
-      ground: options.ground,
-      temperature: options.temperature,
-      humidity: options.humidity,
-      indoorTemperature: options.indoor_temperature,
-      indoorHumidity: options.indoor_humidity,
-      trees: [],
-    },
+    lot: lotOf(budget),
     buildings: [],
-    spaces: rooms.map((room) => ({
-      id: room.id,
-      buildingId: room.building,
-      name: room.id,
-      volume: room.volume,
-      box: null,
-      absorption: absorptionOf(room),
-    })),
+    spaces: rooms.map(spaceOf),
     surfaces: rooms.flatMap(surfacesOf),
     ...sourcesOf(budget),
     paths: elements.map(({ from, to, id }, i) => ({
@@ -179,17 +185,7 @@ export function planOfBudget(budget: Budget): Plan {
       id: fence.id ?? `fence-${i}`,
       name: fence.id ?? `fence ${i + 1}`,
     })),
-    receivers: receivers.map(({ id, kind, room, position, facade, side, distances }) => ({
-      id,
-      name: id,
-      says: "",
-      kind,
-      spaceId: room ?? null,
-      position: position ?? null,
-      facade,
-      side,
-      distances,
-    })),
+    receivers: receivers.map(receiverOf),
     criteria: criteriaOf(budget),
     situations: situationsOf(budget),
   };

@@ -1,8 +1,9 @@
+import { SPEED_OF_SOUND } from "../air";
 import { BAND_COUNT, EXACT_BANDS } from "../bands";
+import { energyOf, levelOf } from "../levels";
 import { toArithmetic } from "../spectrum";
 import type { DuctPiece } from "./run";
 
-const SPEED_OF_SOUND = 343.2;
 const FLUSH = 0.7;
 const FREE = 1;
 
@@ -19,7 +20,7 @@ function mouthTerm(section: number, a: number, frequency: number): number {
  */
 export function endReflection(section: number, flush: boolean): Float64Array {
   const a = flush ? FLUSH : FREE;
-  return Float64Array.from(EXACT_BANDS, (frequency) => 10 * Math.log10(1 + mouthTerm(section, a, frequency)));
+  return Float64Array.from(EXACT_BANDS, (frequency) => levelOf(1 + mouthTerm(section, a, frequency)));
 }
 
 /**
@@ -30,7 +31,7 @@ export function entryGain(section: number): Float64Array {
   return Float64Array.from(EXACT_BANDS, (frequency) => {
     const wavelength = SPEED_OF_SOUND / frequency;
     const gain = wavelength ** 2 / (Math.PI * section) / (1 + mouthTerm(section, FLUSH, frequency));
-    return 10 * Math.log10(Math.max(1, gain));
+    return levelOf(Math.max(1, gain));
   });
 }
 
@@ -48,5 +49,5 @@ export function runAttenuation(run: readonly DuctPiece[]): Float64Array {
 /** S tau of a duct entered at a mouth of that opening, m2: S 10^((dL_entry - attenuations)/10) (solver method 7). */
 export function ductPassing(opening: number, run: readonly DuctPiece[]): Float64Array {
   const lost = runAttenuation(run);
-  return entryGain(opening).map((gain, band) => opening * 10 ** ((gain - lost[band]) / 10));
+  return entryGain(opening).map((gain, band) => opening * energyOf(gain - lost[band]));
 }

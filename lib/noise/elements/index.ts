@@ -22,7 +22,7 @@ export const elementKinds = {
   flanking: flankingKind,
 } as const;
 
-export const elementSchema = z.discriminatedUnion("kind", [
+const anyElement = z.discriminatedUnion("kind", [
   wallKind.schema,
   roofKind.schema,
   floorKind.schema,
@@ -33,5 +33,18 @@ export const elementSchema = z.discriminatedUnion("kind", [
   ductKind.schema,
   flankingKind.schema,
 ]);
+
+/** Open part of an element where its kind has one, m2, and the name of that field. */
+function openingOf({ kind, params }: z.infer<typeof anyElement>): { field: string; area: number } | null {
+  if (kind === "door") return { field: "gapArea", area: params.gapArea };
+  return kind === "window" ? { field: "openArea", area: params.openArea } : null;
+}
+
+/** Any element of a plan. An opening is never larger than what it is in. */
+export const elementSchema = anyElement.superRefine((element, context) => {
+  const opening = openingOf(element);
+  if (!opening || opening.area <= element.area) return;
+  context.addIssue({ code: "custom", path: ["params", opening.field], message: "It cannot be larger than the whole." });
+});
 export type PathElement = z.infer<typeof elementSchema>;
 export type ElementKindName = keyof typeof elementKinds;

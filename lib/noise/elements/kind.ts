@@ -1,7 +1,18 @@
 import { z } from "zod";
 
 /** How a kind of path is drawn: one hatch in every drawing. */
-export const PATH_KINDS = ["wall", "roof", "floor", "window", "outdoor unit", "duct", "leak", "door", "flanking", "in the room"] as const;
+export const PATH_KINDS = [
+  "wall",
+  "roof",
+  "floor",
+  "window",
+  "outdoor unit",
+  "duct",
+  "leak",
+  "door",
+  "flanking",
+  "in the room",
+] as const;
 export type PathKind = (typeof PATH_KINDS)[number];
 
 const metres = z.number().min(-1000).max(1000);
@@ -18,7 +29,9 @@ export const placedElement = {
   limit: z.number().min(0).max(120).nullable().default(null),
   /** Centre, outward normal and extent [across, up] of elements to outdoors, m. */
   position: z.tuple([metres, metres, metres]).nullable(),
-  normal: z.tuple([z.number().min(-1).max(1), z.number().min(-1).max(1), z.number().min(-1).max(1)]).nullable(),
+  normal: z
+    .tuple([z.number().min(-1).max(1), z.number().min(-1).max(1), z.number().min(-1).max(1)])
+    .nullable(),
   size: z.tuple([z.number().min(0.001).max(1000), z.number().min(0.001).max(1000)]).nullable(),
   /** Directivity towards the listener, dB; null follows the geometry. */
   directivity: z.number().min(-30).max(20).nullable().default(null),
@@ -45,6 +58,7 @@ export interface ElementKind<N extends string, S extends z.ZodRawShape> {
   passing: (element: Passing<z.infer<z.ZodObject<S>>>) => Float64Array;
 }
 
+/** A kind of element from what it says of itself; its schema holds what every element has, and its own `params`. */
 export function elementKind<N extends string, S extends z.ZodRawShape>(kind: {
   name: N;
   label: string;

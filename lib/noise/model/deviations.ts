@@ -18,6 +18,7 @@ export const OUTDOOR_DEVIATION = 3;
 
 const SOURCE_DEVIATIONS: Readonly<Record<Source["basis"], number>> = { measured: 2, typed: 3, estimated: 6 };
 
+/** The deviation of a loss with that basis at a band's index, dB. */
 export function elementDeviation(basis: Basis, band: number): number {
   return ELEMENT_DEVIATIONS[basis][band];
 }

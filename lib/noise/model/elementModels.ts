@@ -4,7 +4,7 @@ import { elementKinds, type PathElement } from "../elements";
 import type { PathKind } from "../elements/kind";
 import { BEHIND_BUILDING, DIFFUSE, IN_FRONT, OVER_ROOF } from "../facade";
 import { energyOf } from "../levels";
-import type { Face } from "../outdoors/face";
+import { liesFlat, type Face } from "../outdoors/face";
 import type { Path, Plan } from "../plan";
 import type { Note } from "../verdict";
 import { passingOfElement, type ElementPassing } from "./passing";
@@ -23,20 +23,28 @@ export interface ElementModel extends ElementPassing, Link {
   readonly diffuse: number;
 }
 
-export interface Parts {
+/** Elements that stand between two spaces, with what every element of the plan lets pass. */
+export interface ElementModels {
   readonly elements: readonly ElementModel[];
   /** Of every element of the plan, placed or not. */
   readonly passings: ReadonlyMap<string, ElementPassing>;
 }
 
-function faceOf({ position, normal, size, kind }: PathElement): Face | null {
-  return position && { at: position, normal, size, isRoof: kind === "roof" };
+/** Whether an element has neither a front nor a back: a roof of any pitch, and whatever lies flat, a roof window or a cowl. */
+function isLikeRoof({ kind, normal }: PathElement): boolean {
+  return kind === "roof" || (normal !== null && liesFlat(normal));
 }
 
-/** D_c towards the front and the back of an element, as factors; equal for roofs and free duct mouths (solver method 5). */
-export function directivityOf({ directivity, kind, normal }: PathElement): { front: number; back: number } {
+function faceOf(element: PathElement): Face | null {
+  const { position, normal, size } = element;
+  return position && { at: position, normal, size, likeRoof: isLikeRoof(element) };
+}
+
+/** D_c towards the front and the back of an element, as factors; equal for roofs, flat faces and free duct mouths (solver method 5). */
+export function directivityOf(element: PathElement): { front: number; back: number } {
+  const { directivity, kind, normal } = element;
   if (directivity !== null) return { front: energyOf(directivity), back: energyOf(directivity) };
-  if (kind === "roof") return { front: energyOf(OVER_ROOF), back: energyOf(OVER_ROOF) };
+  if (isLikeRoof(element)) return { front: energyOf(OVER_ROOF), back: energyOf(OVER_ROOF) };
   if (kind === "duct" && !normal) return { front: 1, back: 1 };
   return { front: energyOf(IN_FRONT), back: energyOf(BEHIND_BUILDING) };
 }
@@ -61,7 +69,7 @@ export function elementModels(
   losses: ReadonlyMap<string, EffectiveLoss>,
   rooms: readonly RoomModel[],
   notes: Note[],
-): Parts {
+): ElementModels {
   const paths = new Map(plan.paths.map((path) => [path.id, path]));
   const roomsById = new Map(rooms.map((room) => [room.space.id, room]));
   const passings = new Map<string, ElementPassing>();

@@ -22,7 +22,8 @@ export interface ElementPassing {
 /** Share of the energy from which on a part matters for the basis of the whole. */
 export const MATTERS = 0.1;
 
-function kindPassing(element: PathElement, loss: Float64Array): Float64Array {
+/** S tau that a kind reckons of an element and the loss of its construction in dB, m2; NaN where that is not known. */
+export function passingOfKind(element: PathElement, loss: Float64Array): Float64Array {
   const passing = elementKinds[element.kind].passing as (of: Passing<PathElement["params"]>) => Float64Array;
   return passing({ area: element.area, loss, params: element.params }); // the kind and its params belong together
 }
@@ -34,7 +35,7 @@ function limitPassing({ limit, area }: PathElement): number {
 
 /** An opening: its area is geometry that the user gave. */
 function openPassing(element: PathElement): ElementPassing {
-  const given = kindPassing(element, new Float64Array(BAND_COUNT));
+  const given = passingOfKind(element, new Float64Array(BAND_COUNT));
   const unknown = unknownBands(given);
   return {
     passing: given.map((area) => (Number.isNaN(area) ? 0 : area)),
@@ -56,7 +57,7 @@ export function passingOfElement(element: PathElement, of: EffectiveLoss | null)
   const shut = closed.map(
     (decibels) => (decibels === Infinity ? 0 : element.area * energyOf(-decibels)) + limit,
   );
-  const passing = kindPassing(element, closed).map((area) => area + limit);
+  const passing = passingOfKind(element, closed).map((area) => area + limit);
   const opening = (band: number) => (passing[band] > 0 ? (passing[band] - shut[band]) / passing[band] : 0);
   const basisOf = (band: number): Basis => of?.bases[band] ?? "estimated";
   const bases = Array.from(passing, (_, band): Basis =>

@@ -3,6 +3,7 @@ import { absorptionOf } from "../rooms";
 import type { Note } from "../verdict";
 import { unknownBands, ALL_BANDS, type BandMask } from "./masks";
 
+/** A space ready to reckon with. */
 export interface RoomModel {
   readonly index: number;
   readonly space: Space;
@@ -11,6 +12,7 @@ export interface RoomModel {
   readonly unknown: BandMask;
 }
 
+/** Spaces of a plan in its order, with their absorption. What is not known becomes a note. */
 export function roomModels({ spaces, surfaces, lot }: Plan, notes: Note[]): RoomModel[] {
   return spaces.map((space, index) => {
     const absorption = absorptionOf(space, surfaces, lot);

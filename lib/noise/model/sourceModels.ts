@@ -1,4 +1,3 @@
-import { bandNames } from "./bandNames";
 import { BAND_COUNT } from "../bands";
 import { runAttenuation } from "../ducts/attenuation";
 import { energyOf } from "../levels";
@@ -7,6 +6,7 @@ import type { Outlet, Plan } from "../plan";
 import { sourceKinds, type Source } from "../sources";
 import { toArithmetic } from "../spectrum";
 import type { Note } from "../verdict";
+import { bandNames } from "./bandNames";
 import { sourceDeviations } from "./deviations";
 import type { ElementModel } from "./elementModels";
 import { ALL_BANDS, knownEnergies, maskWhere, unknownBands, type BandMask } from "./masks";

@@ -30,7 +30,8 @@ const MOST_DOUBLE = 10 ** 2.5;
 /** A source or listener this near to a screen's line, m, stands on the studio's side of it (solver method 6). */
 const ON_THE_LINE = 0.1;
 
-export function distanceToLine([x, y]: readonly number[], { p1, p2 }: Pick<Screen, "p1" | "p2">): number {
+/** Distance on plan from a place to a screen's line, ends included, m. */
+function distanceToLine([x, y]: readonly number[], { p1, p2 }: Pick<Screen, "p1" | "p2">): number {
   const [dx, dy] = [p2[0] - p1[0], p2[1] - p1[1]];
   const square = dx * dx + dy * dy;
   const along = square === 0 ? 0 : Math.min(1, Math.max(0, ((x - p1[0]) * dx + (y - p1[1]) * dy) / square));
@@ -38,8 +39,9 @@ export function distanceToLine([x, y]: readonly number[], { p1, p2 }: Pick<Scree
   return Math.sqrt(besideX * besideX + besideY * besideY);
 }
 
-export const standsOn = (place: Place, screen: Screen): boolean =>
-  distanceToLine(place, screen) <= ON_THE_LINE;
+function standsOn(place: Place, screen: Screen): boolean {
+  return distanceToLine(place, screen) <= ON_THE_LINE;
+}
 
 /** Where a plan ray crosses a line: share of the ray, 0 to 1, or NaN. */
 export function crossing(

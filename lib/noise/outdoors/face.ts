@@ -5,16 +5,25 @@ export interface Face {
   readonly at: Place;
   readonly normal: Place | null;
   readonly size: readonly [across: number, up: number] | null;
-  readonly isRoof: boolean;
+  /** Radiates and takes in without a front or a back: a roof, or any face that lies flat. */
+  readonly likeRoof: boolean;
 }
 
 const MOST_PARTS = 12;
 const NEAREST = 1;
 const LEVEL = 1e-6;
 
+/**
+ * Whether a face lies flat: its normal stands nearer to the vertical than to the ground. The 3 dB in front of a face and
+ * the 7 dB behind it speak of vertical faces only (solver method 5), so what lies flat has neither.
+ */
+export function liesFlat([x, y, z]: Place): boolean {
+  return Math.abs(z) > Math.hypot(x, y);
+}
+
 /** Whether a place lies behind the plane of a face; on the plane is in front, and nothing is behind a roof. */
-export function isBehind({ at, normal, isRoof }: Face, place: Place): boolean {
-  if (!normal || isRoof) return false;
+export function isBehind({ at, normal, likeRoof }: Face, place: Place): boolean {
+  if (!normal || likeRoof) return false;
   return (place[0] - at[0]) * normal[0] + (place[1] - at[1]) * normal[1] + (place[2] - at[2]) * normal[2] < 0;
 }
 
@@ -37,16 +46,16 @@ function cuts(length: number, distance: number): number {
 }
 
 /** How many parts [across, up] a face is cut into towards a place: [1, 1] from twice its longest side on. */
-export function cutTowards({ at, normal, size, isRoof }: Face, place: Place): [number, number] {
-  if (!size || (!normal && !isRoof)) return [1, 1];
+export function cutTowards({ at, normal, size, likeRoof }: Face, place: Place): [number, number] {
+  if (!size || (!normal && !likeRoof)) return [1, 1];
   const [x, y, z] = [place[0] - at[0], place[1] - at[1], place[2] - at[2]];
   const distance = Math.max(NEAREST, Math.sqrt(x * x + y * y + z * z));
   if (distance >= 2 * Math.max(size[0], size[1])) return [1, 1];
   return [cuts(size[0], distance), cuts(size[1], distance)];
 }
 
-/** Centres of the equal parts of a face (solver method 5, near field). */
-export function partsOf({ at, normal, size }: Face, [across, up]: [number, number]): Place[] {
+/** Centres of the equal parts of a face cut that often across and up, m (solver method 5, near field). */
+export function centresOf({ at, normal, size }: Face, [across, up]: [number, number]): Place[] {
   if (!size || across * up <= 1) return [at];
   const [u, v] = axesOf(normal ?? [0, 0, 1]);
   const places: Place[] = [];

@@ -12,6 +12,7 @@ export interface GroundShape {
   readonly d: number;
 }
 
+/** The factors at a height in m; below ground counts as on it. */
 export function groundShape(z: number): GroundShape {
   const height = Math.max(0, z);
   const square = height * height;

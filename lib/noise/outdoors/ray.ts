@@ -18,6 +18,7 @@ export interface End {
   readonly beyond?: boolean;
 }
 
+/** The end of a ray at a place, m; `beyond` for a listener on the far side of a fence on whose line it stands. */
 export function endAt(at: Place, beyond = false): End {
   return { at, shape: groundShape(at[2]), beyond };
 }

@@ -14,12 +14,14 @@ type Corner = readonly number[];
 
 const TOO_NEAR = 0.01;
 
+/** The plane through two places, from the first towards the second; along x where they stand over each other. */
 export function sectionThrough(from: Place, to: Place): Section {
   const [dx, dy] = [to[0] - from[0], to[1] - from[1]];
   const length = Math.hypot(dx, dy);
   return { origin: [from[0], from[1]], direction: length < TOO_NEAR ? [1, 0] : [dx / length, dy / length] };
 }
 
+/** Metres along the plane of what is nearest to a place on plan, signed. */
 export function alongOf({ origin, direction }: Section, [x, y]: Corner): number {
   return (x - origin[0]) * direction[0] + (y - origin[1]) * direction[1];
 }
@@ -29,10 +31,12 @@ export function besideOf({ origin, direction }: Section, [x, y]: Corner): number
   return (y - origin[1]) * direction[0] - (x - origin[0]) * direction[1];
 }
 
+/** The place on the plane that far along and that high, m. */
 export function placeAt({ origin, direction }: Section, along: number, height: number): Place {
   return [origin[0] + along * direction[0], origin[1] + along * direction[1], height];
 }
 
+/** Centre of the box around an outline on plan, m. */
 export function centreOf(corners: readonly Corner[]): [number, number] {
   const xs = corners.map(([x]) => x);
   const ys = corners.map(([, y]) => y);
@@ -61,6 +65,7 @@ export function movedThrough(section: Section, corners: readonly Corner[]): Sect
   return { ...section, origin: [section.origin[0] - beside * dy, section.origin[1] + beside * dx] };
 }
 
+/** The four corners of a room's box on plan, m. */
 export function cornersOf({
   at: [x, y],
   size: [width, depth],

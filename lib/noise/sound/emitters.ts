@@ -3,7 +3,7 @@ import { BEHIND_FACADE } from "../facade";
 import { directivityOf, type ElementModel } from "../model/elementModels";
 import type { SourceModel } from "../model/sourceModels";
 import type { Place } from "../outdoors/barrier";
-import { cutTowards, isBehind, partsOf, type Face } from "../outdoors/face";
+import { centresOf, cutTowards, isBehind, type Face } from "../outdoors/face";
 import { addRay, endAt, type End, type Yard } from "../outdoors/ray";
 
 /** Something that sounds outdoors: an element of a room that is played in, an outdoor source, or the mouth of a run. */
@@ -56,7 +56,7 @@ function elementEmitter(model: ElementModel, face: Face): Emitter {
 export function sourceEmitters({ source, emissions, index }: SourceModel): Emitter[] {
   return emissions.flatMap(({ at, directivity, outlet, energy }): Emitter[] => {
     if (!at) return [];
-    const face: Face = { at, normal: null, size: null, isRoof: false };
+    const face: Face = { at, normal: null, size: null, likeRoof: false };
     const shared = {
       element: null,
       source: index,
@@ -87,7 +87,7 @@ export function emittersOf(
 function endsTowards({ face, ends }: Emitter, place: Place): End[] {
   const [across, up] = cutTowards(face, place);
   const key = across * 100 + up;
-  const known = ends.get(key) ?? partsOf(face, [across, up]).map((at) => endAt(at));
+  const known = ends.get(key) ?? centresOf(face, [across, up]).map((at) => endAt(at));
   ends.set(key, known);
   return known;
 }

@@ -1,7 +1,7 @@
 import { balanceRooms, type Balance } from "../balance";
 import { BAND_COUNT } from "../bands";
 import type { EffectiveLoss } from "../effective";
-import { elementModels, type ElementModel, type Parts } from "../model/elementModels";
+import { elementModels, type ElementModel, type ElementModels } from "../model/elementModels";
 import { roomModels, type RoomModel } from "../model/roomModels";
 import { sourceModels, type SourceModel } from "../model/sourceModels";
 import { airAttenuations } from "../outdoors/air";
@@ -17,7 +17,7 @@ export interface Field {
   readonly yard: Yard;
   readonly rooms: readonly RoomModel[];
   readonly elements: readonly ElementModel[];
-  readonly passings: Parts["passings"];
+  readonly passings: ElementModels["passings"];
   readonly sources: readonly SourceModel[];
   readonly balance: Balance;
   readonly emitters: readonly Emitter[];
@@ -35,7 +35,8 @@ export interface Field {
   readonly travel: Float64Array;
 }
 
-export function yardOf({ lot, fences }: Plan): Yard {
+/** Air in dB/m, ground and fences of a plan. */
+function yardOf({ lot, fences }: Plan): Yard {
   return { air: airAttenuations(lot.temperature, lot.humidity), ground: lot.ground, screens: fences };
 }
 
@@ -121,6 +122,7 @@ function groupsOf({ groups }: Balance, rooms: readonly number[]): (room: number)
   return (room) => inside.has(groups[room]);
 }
 
+/** Index of the room that a listener is in; -1 outdoors or in no room of the plan. */
 export function roomIndexOf(rooms: readonly RoomModel[], receiver: Receiver): number {
   return receiver.kind === "room" ? rooms.findIndex(({ space }) => space.id === receiver.spaceId) : -1;
 }

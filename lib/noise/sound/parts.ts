@@ -150,6 +150,7 @@ function addGiven({ sources }: Field, element: number, weights: Float64Array, ou
   }
 }
 
+/** The energy at a listener cut by source, by way and by entry, over the nine bands. Sources that are off have no part. */
 export function partsOf(field: Field, hearing: Hearing, playing: Playing): Parts {
   const leaving = outdoorParts(field, hearing, playing);
   const passing = passageParts(hearing, playing);

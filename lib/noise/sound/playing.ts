@@ -19,7 +19,7 @@ export interface Playing {
  * Weights of the sources in a situation. Over the whole period a source counts with the share of the time it runs, in
  * the loudest part in full (solver method 6). Without a situation everything runs; what is not named is off.
  */
-export function weightsOf(
+function weightsOf(
   { sources }: Field,
   situation: Situation | null,
   averaging: Criterion["averaging"],
@@ -75,6 +75,7 @@ function arrivingOf(
   return arriving;
 }
 
+/** The field in one situation (null: everything runs), averaged as a limit asks: energies mixed over the sources. */
 export function play(field: Field, situation: Situation | null, averaging: Criterion["averaging"]): Playing {
   const weights = weightsOf(field, situation, averaging);
   const emitted = mixBySource(field.emitted, field.emitters.length, weights);

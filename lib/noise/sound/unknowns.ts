@@ -1,8 +1,7 @@
 import type { ElementModel } from "../model/elementModels";
-import type { BandMask } from "../model/masks";
+import { ALL_BANDS, type BandMask } from "../model/masks";
 import type { RoomModel } from "../model/roomModels";
 import type { SourceModel } from "../model/sourceModels";
-import { ALL_BANDS } from "../model/masks";
 import type { Field } from "./field";
 
 /**

@@ -36,6 +36,7 @@ export interface SourceKind<N extends string, S extends z.ZodRawShape> {
   voice: (band: Band) => string;
 }
 
+/** A kind of source from what it says of itself; its schema holds what every source has, and its own `params`. */
 export function sourceKind<N extends string, S extends z.ZodRawShape>(kind: {
   name: N;
   label: string;

@@ -1,4 +1,4 @@
-import { AIR_DENSITY, SPEED_OF_SOUND as c } from "./air";
+import { AIR_DENSITY, SPEED_OF_SOUND as c } from "../air";
 import type { Connection } from "./description";
 import { criticalFrequencyAt, type Leaf } from "./leaf";
 import type { DiffuseWindow } from "./panel";

@@ -1,4 +1,4 @@
-import { AIR_IMPEDANCE, SPEED_OF_SOUND } from "./air";
+import { AIR_IMPEDANCE, SPEED_OF_SOUND } from "../air";
 
 /** A layer of fluid at one frequency: thickness m, wavenumber 1/m and impedance N s/m³ as real and imaginary parts. */
 export type FluidLayer = {

@@ -1,4 +1,3 @@
-export { combineLimit, composite, gapCombined, type Part } from "./composite";
 export {
   connectionSchema,
   descriptionSchema,

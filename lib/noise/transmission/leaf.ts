@@ -1,5 +1,5 @@
 import { findMaterial } from "../materials";
-import { SPEED_OF_SOUND } from "./air";
+import { SPEED_OF_SOUND } from "../air";
 import type { LeafDescription, PliedLeafDescription, PlyMaterial } from "./description";
 
 /** One leaf as the formulas see it: mass kg/m², frequency Hz, thickness m (unknown for a leaf known only by mass). */

@@ -1,6 +1,6 @@
 import { bridgedLeaf, bridgeTransmission } from "./bridge";
 import { capOfDouble, capOfSingle } from "./caps";
-import { coefficientOf } from "./coefficient";
+import { energyOf } from "../levels";
 import type { Connection, Description, DoubleDescription } from "./description";
 import { cavityLayers, type Cavity } from "./fluid";
 import { leafOf, type Leaf } from "./leaf";
@@ -59,7 +59,7 @@ function factsOf(leaves: readonly Leaf[], cavity: number, cap: number): Transmis
 
 function singleParts(leaf: Leaf, size: Size, frequency: number, cap: number): TransmissionParts {
   const forced = leafTransmission(leaf, frequency, diffuseWindow(size, frequency));
-  return { air: forced + resonantTransmission(leaf, size, frequency), bridge: 0, cap: coefficientOf(cap) };
+  return { air: forced + resonantTransmission(leaf, size, frequency), bridge: 0, cap: energyOf(-cap) };
 }
 
 type Frame = { leaf1: Leaf; leaf2: Leaf; cavity: Cavity; connection: Connection; size: Size; cap: number };
@@ -101,7 +101,7 @@ function doubleParts(frame: Frame, studs: StiffStuds | undefined, frequency: num
   const layers = cavityLayers(frame.cavity, frequency);
   const spring = studs && studSpring(studs.stiffness, studs.resonance, frequency);
   const air = stackTransmission({ leaf1, leaf2, layers, ...(spring && { spring }) }, frequency, window);
-  const cap = coefficientOf(frame.cap);
+  const cap = energyOf(-frame.cap);
   if (connection.kind === "none") return { air, bridge: 0, cap };
   const pair = [leaf1, leaf2].map((leaf) =>
     bridgedLeaf(leaf, leafTransmission(leaf, frequency, window), frequency, window),

@@ -1,4 +1,4 @@
-import { SPEED_OF_SOUND } from "./air";
+import { SPEED_OF_SOUND } from "../air";
 import { gaussNodes } from "./gaussNodes";
 
 /** Width and height of the panel, m. */

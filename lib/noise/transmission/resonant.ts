@@ -1,4 +1,4 @@
-import { AIR_IMPEDANCE, SPEED_OF_SOUND as c } from "./air";
+import { AIR_IMPEDANCE, SPEED_OF_SOUND as c } from "../air";
 import { criticalFrequencyAt, totalLossFactor, type Leaf } from "./leaf";
 import type { Size } from "./panel";
 

@@ -1,4 +1,4 @@
-import { AIR_IMPEDANCE, SPEED_OF_SOUND } from "./air";
+import { AIR_IMPEDANCE, SPEED_OF_SOUND } from "../air";
 import type { FluidLayer } from "./fluid";
 import { criticalFrequencyAt, totalLossFactor, type Leaf } from "./leaf";
 import {

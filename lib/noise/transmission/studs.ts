@@ -1,4 +1,4 @@
-import { ADIABATIC_BULK_MODULUS, ISOTHERMAL_BULK_MODULUS, SPEED_OF_SOUND } from "./air";
+import { ADIABATIC_BULK_MODULUS, ISOTHERMAL_BULK_MODULUS, SPEED_OF_SOUND } from "../air";
 import type { Cavity } from "./fluid";
 import type { Leaf } from "./leaf";
 
@@ -38,6 +38,7 @@ export function studResonance(leaf1: Leaf, leaf2: Leaf, cavity: Cavity & { stiff
   return Math.sqrt(stiffness / reducedOf(leaf1.mass, leaf2.mass)) / (2 * Math.PI);
 }
 
+/** That spring at `frequency` Hz: stiffness per area in N/m³, faded out above the resonance in Hz. Solver method, 2.6. */
 export function studSpring(stiffness: number, resonance: number, frequency: number): StudSpring {
   const size = stiffness / (2 * Math.PI * frequency * (1 + (frequency / resonance) ** 4));
   return { real: SPRING_LOSS * size, imaginary: -size };

@@ -1,5 +1,5 @@
 import { exactMidband, OCTAVE_BANDS, THIRD_BANDS } from "../bands";
-import { lossOf } from "./coefficient";
+import { levelOf } from "../levels";
 import type { Description } from "./description";
 import { modelOf, type Model, type TransmissionFacts } from "./modelOf";
 
@@ -21,8 +21,8 @@ export function transmissionOf(description: Description): Transmission {
   const model = modelOf(description);
   const tau = THIRD_BANDS.map((nominal) => meanTransmission(model, exactMidband(nominal)));
   return {
-    third: tau.map(lossOf),
-    octave: OCTAVE_BANDS.map((_, i) => lossOf(octaveMean(tau, i))),
+    third: tau.map((each) => -levelOf(each)),
+    octave: OCTAVE_BANDS.map((_, i) => -levelOf(octaveMean(tau, i))),
     facts: model.facts,
   };
 }

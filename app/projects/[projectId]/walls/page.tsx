@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import { sheetsOf } from "@/app/_server/constructionSheets";
 import { openProjectPage } from "@/app/_server/projectPage";
 import { budgetAddress, elementAddress, signInAddress, wallsAddress } from "@/components/addresses";
 import { YardFrame } from "@/components/frame/YardFrame";
@@ -6,7 +7,6 @@ import { leadOf } from "@/components/walls/answer";
 import { VerdictStrip } from "@/components/walls/VerdictStrip";
 import { WallIndex } from "@/components/walls/WallIndex";
 import { wallFaces } from "@/components/walls/wallRows";
-import { sheetOf } from "@/lib/noise/sheet";
 
 export const dynamic = "force-dynamic";
 export const metadata: Metadata = { title: "Walls & openings" };
@@ -14,7 +14,7 @@ export const metadata: Metadata = { title: "Walls & openings" };
 export default async function WallsPage({ params }: { params: Promise<{ projectId: string }> }) {
   const { projectId } = await params;
   const { user, project, answer } = await openProjectPage(projectId, signInAddress(wallsAddress(projectId)));
-  const sheets = answer.plan.constructions.map((construction) => sheetOf(construction));
+  const sheets = sheetsOf(answer.plan);
   const lead = leadOf(answer);
   return (
     <YardFrame project={project} user={user} stage="walls" revision={answer.revision}>

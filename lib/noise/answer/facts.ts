@@ -1,10 +1,10 @@
-import { rankOf, type Way } from "./answer/paths";
-import type { Weighing } from "./answer/weighing";
-import { OCTAVE_BANDS } from "./bands";
-import { dropWithout } from "./levels";
-import { sourceKinds } from "./sources";
-import type { Part } from "./sound/parts";
-import type { SentenceFacts } from "./verdict";
+import { rankOf, type Way } from "./paths";
+import type { Weighing } from "./weighing";
+import { OCTAVE_BANDS } from "../bands";
+import { dropWithout } from "../levels";
+import { sourceKinds } from "../sources";
+import type { Part } from "../sound/parts";
+import type { SentenceFacts } from "../verdict";
 
 const NAMED = 3;
 

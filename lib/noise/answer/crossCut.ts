@@ -1,4 +1,4 @@
-import type { Way } from "./answer/paths";
+import type { Way } from "./paths";
 import {
   leavingStation,
   listenerStation,
@@ -6,11 +6,11 @@ import {
   windowStation,
   yardStation,
   type Walk,
-} from "./answer/stations";
-import type { Weighing } from "./answer/weighing";
+} from "./stations";
+import type { Weighing } from "./weighing";
 import { leadingSource } from "./facts";
-import type { SourceModel } from "./model/sourceModels";
-import { crossing, type Place } from "./outdoors/barrier";
+import type { SourceModel } from "../model/sourceModels";
+import { crossing, type Place } from "../outdoors/barrier";
 import {
   alongOf,
   besideOf,
@@ -22,11 +22,11 @@ import {
   shellOutline,
   type Section,
   type Stretch,
-} from "./outdoors/section";
-import type { Building, Plan, Receiver, Space } from "./plan";
-import type { Field } from "./sound/field";
-import type { SpreadFrom } from "./sound/unknowns";
-import type { CrossCut } from "./verdict";
+} from "../outdoors/section";
+import type { Building, Plan, Receiver, Space } from "../plan";
+import type { Field } from "../sound/field";
+import type { SpreadFrom } from "../sound/unknowns";
+import type { CrossCut } from "../verdict";
 
 /** Ground shown beyond what is cut, m. */
 const BEYOND = 2;

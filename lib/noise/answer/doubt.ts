@@ -1,7 +1,8 @@
-import { BAND_COUNT } from "./bands";
-import { OUTDOOR_DEVIATION } from "./model/deviations";
-import type { Part, Parts } from "./sound/parts";
-import type { ReceiverVerdict } from "./verdict";
+import { BAND_COUNT } from "../bands";
+import { weightedSum } from "../levels";
+import { OUTDOOR_DEVIATION } from "../model/deviations";
+import type { Part, Parts } from "../sound/parts";
+import type { ReceiverVerdict } from "../verdict";
 
 /** Doubt of a level without any energy to judge by, dB. */
 const NO_ENERGY = 3;
@@ -60,10 +61,7 @@ export function doubtParts(parts: Parts, energy: Float64Array, band: number): Do
 
 /** Doubt of a weighted total, dB: the energy-weighted mean over bands (solver method 2.9). */
 export function weightedDoubt(doubts: Float64Array, energy: Float64Array, factors: Float64Array): number {
-  let [sum, whole] = [0, 0];
-  for (let band = 0; band < BAND_COUNT; band += 1) {
-    sum += doubts[band] * factors[band] * energy[band];
-    whole += factors[band] * energy[band];
-  }
-  return whole > 0 ? sum / whole : NO_ENERGY;
+  const whole = weightedSum(energy, factors);
+  const weighted = factors.map((factor, band) => doubts[band] * factor);
+  return whole > 0 ? weightedSum(energy, weighted) / whole : NO_ENERGY;
 }
