@@ -22,9 +22,16 @@ export function checkPart(kind: PartKind, candidate: object, given: object = can
   return part;
 }
 
+/** Paths of what was given and is not in the part as it was read, at any depth. */
 function unknownFields(given: object, known: object): string[] {
-  return Object.keys(given).filter((field) => !Object.hasOwn(known, field));
+  return Object.entries(given).flatMap(([field, value]) => {
+    if (!Object.hasOwn(known, field)) return [field];
+    const read = (known as Record<string, unknown>)[field];
+    return isObject(value) && isObject(read) ? unknownFields(value, read).map((inner) => `${field}.${inner}`) : [];
+  });
 }
+
+const isObject = (value: unknown): value is object => typeof value === "object" && value !== null;
 
 /** One sentence per field. */
 export function fieldWords(issues: readonly core.$ZodIssue[]): Record<string, string> {

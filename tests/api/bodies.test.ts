@@ -81,6 +81,13 @@ describe("bodies", () => {
     expect((await stage.project.reload()).revision).toBe(before.revision);
   });
 
+  it("a field that is not known is refused wherever it stands, and the ones beside it are not kept", async () => {
+    const before = await stage.project.reload();
+    const answer = await change({ area: 2, params: { colour: "red" } });
+    expect([answer.status, Object.keys(((await answer.json()) as Refused).error.fields!)]).toEqual([422, ["params.colour"]]);
+    expect((await stage.project.reload()).revision).toBe(before.revision);
+  });
+
   it("a report of the browser: 8 kB, no more, and no word back", async () => {
     const short = await ask(REPORT, { method: "POST", headers: { "content-type": "application/csp-report" }, body: "{}" });
     const long = await ask(REPORT, { method: "POST", headers: { "content-type": "application/csp-report" }, body: "x".repeat(8193) });
