@@ -105,6 +105,14 @@ const elementKind = fc.oneof(
   fc.record({ kind: fc.constant("window"), params: fc.record({ openArea: number(0, 2) }) }),
   fc.record({ kind: fc.constant("duct"), params: fc.record({ opening: number(0.0001, 1), run }) }),
 );
+/** An opening is never larger than what it is in; up to the whole is allowed. */
+function openWithin<P extends object>(params: P, area: number): P {
+  const within = Object.entries(params).map(([field, value]) =>
+    typeof value === "number" && field.endsWith("Area") ? [field, Math.min(value, area)] : [field, value],
+  );
+  return Object.fromEntries(within) as P; // the same fields with the same types
+}
+
 const element = (i: number) =>
   fc
     .tuple(
@@ -123,7 +131,7 @@ const element = (i: number) =>
         diffuseness: fc.option(number(-20, 0), { nil: null, freq: 1 }),
       }),
     )
-    .map(([kind, rest]) => ({ ...rest, ...kind }));
+    .map(([kind, rest]) => ({ ...rest, ...kind, params: openWithin(kind.params, rest.area) }));
 
 const board = fc.record({
   kind: fc.constant("board"),
