@@ -161,7 +161,13 @@ const thicknessOf = ({ thickness }: ConstructionSheet) =>
   thickness === null ? "–" : formatQuantity(toMillimetres(thickness), 0);
 const massOf = ({ surfaceMass }: ConstructionSheet) =>
   surfaceMass === null ? "–" : formatNumber(surfaceMass, surfaceMass < 10 ? 1 : 0);
-const measures = (sheet: ConstructionSheet) => `${thicknessOf(sheet)} mm, ${massOf(sheet)} kg/m²`;
+const measures = (sheet: ConstructionSheet) =>
+  [
+    sheet.thickness !== null && `${thicknessOf(sheet)} mm`,
+    sheet.surfaceMass !== null && `${massOf(sheet)} kg/m²`,
+  ]
+    .filter(Boolean)
+    .join(", ");
 
 const basisOf = ({ bases }: ConstructionSheet, loss: ConstructionSheet["loss"]) =>
   (loss[SHOWN[0]!] !== "unknown" && bases[SHOWN[0]!]) || "unknown";

@@ -4,6 +4,7 @@ import { OCTAVE_BANDS } from "../../lib/noise/bands";
 import type { Out } from "../../lib/noise/verdict";
 import { bandWords, wholeDecibels } from "../format";
 import { axisOf, drawDoubt, drawLine, lossScales, pointsOf, type LossPoint } from "./lossGeometry";
+import { LossKey } from "./LossKey";
 import { EndNames, Grid, LitColumn, LitFigure, Swing } from "./LossMarks";
 import { useDrawnWidth } from "../ui/useDrawnWidth";
 
@@ -22,21 +23,30 @@ interface Props {
 
 const PROMISED = { 390: 334, 720: 540, 1024: 280, 1440: 420 };
 const HEIGHT = 330;
+/** Below this width the names leave the drawing for a key above it: the bands need all of it for theirs. */
+const ROOM_FOR_NAMES = 400;
 
 /** What an element stops, band by band, with its doubt, beside what it is compared with. */
 export function LossChart(props: Props) {
   const [place, width] = useDrawnWidth<HTMLDivElement>(PROMISED, 560);
   return (
     <div ref={place} className="min-w-0">
-      <Drawing {...props} width={width} />
+      {width < ROOM_FOR_NAMES && <LossKey {...props} other={props.other?.name} />}
+      <Drawing {...props} width={width} named={width >= ROOM_FOR_NAMES} />
     </div>
   );
 }
 
-function Drawing({ name, loss, doubts, other, massAirMass, litBand, width }: Props & { width: number }) {
+interface DrawingProps extends Props {
+  width: number;
+  /** Whether the lines bear their names themselves. */
+  named: boolean;
+}
+
+function Drawing({ name, loss, doubts, other, massAirMass, litBand, width, named }: DrawingProps) {
   const points = pointsOf(loss, doubts);
   const compared = other ? pointsOf(other.loss, []) : [];
-  const frame = { left: 36, right: width - 78, top: 26, foot: HEIGHT - 34 };
+  const frame = { left: 36, right: width - (named ? 78 : 22), top: 26, foot: HEIGHT - 34 };
   const scales = lossScales(frame, axisOf([...points, ...compared]));
   const lit = points.find(({ band }) => band === OCTAVE_BANDS[litBand]);
   return (
@@ -51,7 +61,9 @@ function Drawing({ name, loss, doubts, other, massAirMass, litBand, width }: Pro
       <LitColumn x={scales.x(OCTAVE_BANDS[litBand]!)} pitch={scales.pitch} frame={frame} />
       <Grid scales={scales} frame={frame} litBand={litBand} />
       <path d={drawDoubt(points, scales)} className="fill-ink" fillOpacity="0.13" />
-      {massAirMass !== null && <Swing frequency={massAirMass} scales={scales} frame={frame} />}
+      {massAirMass !== null && (
+        <Swing frequency={massAirMass} scales={scales} frame={frame} named={named} />
+      )}
       <path
         d={drawLine(compared, scales)}
         fill="none"
@@ -77,12 +89,14 @@ function Drawing({ name, loss, doubts, other, massAirMass, litBand, width }: Pro
         />
       ))}
       {lit && <LitFigure point={lit} scales={scales} />}
-      <EndNames
-        scales={scales}
-        frame={frame}
-        own={{ name, point: points.at(-1) }}
-        other={{ name: other?.name, point: compared.at(-1) }}
-      />
+      {named && (
+        <EndNames
+          scales={scales}
+          frame={frame}
+          own={{ name, point: points.at(-1) }}
+          other={{ name: other?.name, point: compared.at(-1) }}
+        />
+      )}
     </svg>
   );
 }

@@ -42,30 +42,28 @@ export function Grid({ scales, frame, litBand }: { scales: LossScales; frame: Fr
           fontWeight={index === litBand ? 700 : 400}
           letterSpacing={scales.pitch < 29 ? "-0.4" : undefined}
         >
-          {isNamed(index, litBand, scales.pitch) && formatBand(band)}
+          {formatBand(band)}
         </text>
       ))}
-      <text x={frame.right + 8} y={frame.foot + 22} className="fill-ink3!">
+      <text x={frame.right + 3} y={frame.foot + 22} className="fill-ink3!">
         Hz
       </text>
     </g>
   );
 }
 
-/** Pixels a band needs for its name; where there are fewer, every other band is named. */
-const ROOM_FOR_NAME = 25;
-
-/** The lit band always has its name; on a narrow axis its neighbours give way to it. */
-function isNamed(index: number, litBand: number, pitch: number): boolean {
-  if (pitch >= ROOM_FOR_NAME || index === litBand) return true;
-  return index % 2 === 0 && Math.abs(index - litBand) > 1;
+/** The resonance of the leaves on the air between them, left out where it lies below the lowest band. */
+interface SwingProps {
+  frequency: number;
+  scales: LossScales;
+  frame: Frame;
+  named: boolean;
 }
 
-/** The resonance of the leaves on the air between them, left out where it lies below the lowest band. */
-export function Swing({ frequency, scales, frame }: { frequency: number; scales: LossScales; frame: Frame }) {
+export function Swing({ frequency, scales, frame, named }: SwingProps) {
   const x = scales.x(frequency);
   if (x < frame.left || x > frame.right) return null;
-  const lines = ["the leaves swing", `together at ${withUnit(formatNumber(frequency), "Hz")}`];
+  const lines = named ? ["the leaves swing", `together at ${withUnit(formatNumber(frequency), "Hz")}`] : [];
   const after = x < frame.left + 150;
   return (
     <g>

@@ -29,10 +29,18 @@ function TroubleStrip({ trouble, signInHref, onRetry }: Props) {
       <Strip
         kind="error"
         heading="You are signed out."
-        action={<LinkButton href={signInHref}>Sign in again</LinkButton>}
+        action={
+          <>
+            <LinkButton href={signInHref} target="_blank">
+              Sign in again
+            </LinkButton>
+            <Button onClick={onRetry}>Save again</Button>
+          </>
+        }
         className="mb-5"
       >
-        The change was not saved. Sign in, then make it once more.
+        The change was not saved; what you typed is still here. Sign in opens beside this page: come back to it and
+        save again.
       </Strip>
     );
   }

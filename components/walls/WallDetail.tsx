@@ -161,6 +161,7 @@ export function WallDetail({ projectId, elementId, library, may }: WallDetailPro
         >
           <WhatItStops
             name={`this ${words.one}`}
+            kind={element.kind}
             judged={verdict.elements[elementId]}
             sheet={sheet}
             other={marked ? { name: "your mark", loss: marked.hung ?? marked.loss } : formerly}

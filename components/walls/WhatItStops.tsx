@@ -2,12 +2,14 @@ import { OCTAVE_BANDS } from "../../lib/noise/bands";
 import type { ConstructionSheet } from "../../lib/noise/sheet";
 import type { ElementVerdict, Out } from "../../lib/noise/verdict";
 import { bandWords, wholeDecibels, withUnit } from "../format";
+import type { PathElement } from "./elementWords";
 import { Disclosure } from "../ui/Disclosure";
 import { LossChart } from "./LossChart";
 import { basisSentence, LossTable } from "./LossTable";
 
 interface Props {
   name: string;
+  kind: PathElement["kind"];
   judged?: ElementVerdict;
   sheet?: ConstructionSheet;
   other?: { name: string; loss: readonly Out[] };
@@ -15,7 +17,7 @@ interface Props {
 }
 
 /** The element whole: its construction with gap and open part, as it was weighed. */
-export function WhatItStops({ name, judged, sheet, other, litBand }: Props) {
+export function WhatItStops({ name, kind, judged, sheet, other, litBand }: Props) {
   if (!judged) return <p className="text-ink2">Not weighed yet.</p>;
   const opening = openingSentence(judged, sheet, litBand);
   return (
@@ -29,7 +31,7 @@ export function WhatItStops({ name, judged, sheet, other, litBand }: Props) {
         litBand={litBand}
       />
       <p className="mt-2 text-second text-ink2">
-        {sheet ? basisSentence(judged, litBand) : "Reckoned from its open area as entered."} {opening}
+        {sheet ? basisSentence(judged, litBand) : reckonedFrom(kind)} {opening}
       </p>
       <p className="mt-2 text-second text-ink2">
         An estimate, not a promise: workmanship and ways nobody has drawn change it.
@@ -52,3 +54,6 @@ function openingSentence(
   if (typeof whole !== "number" || typeof alone !== "number" || alone - whole < 1) return "";
   return `Shut tight it would stop ${withUnit(wholeDecibels(alone), "dB")} at ${bandWords(OCTAVE_BANDS[litBand]!)}.`;
 }
+
+const reckonedFrom = (kind: PathElement["kind"]) =>
+  kind === "duct" ? "Reckoned from the pieces of its run." : "Reckoned from its open area as entered.";

@@ -9,6 +9,8 @@ const SABINE = 55.26;
 const NEPER = 10 * Math.LOG10E;
 /** Mean absorption coefficient up to which Eyring's formula is taken. */
 const MOST_ALPHA = 0.99;
+/** A room whose surfaces absorb less than this, m2, has no field to speak of: no air, no people, bare rigid walls. */
+const LEAST_AREA = 1e-4;
 const LOWEST_MEASURED = 2;
 const HIGHEST_MEASURED = 7;
 
@@ -77,7 +79,7 @@ export function absorptionOf(space: Space, surfaces: readonly Surface[], lot: Lo
     );
   }
   const own = surfaces.filter(({ spaceId }) => spaceId === space.id);
-  return fromSurfaces(absorption, volume, own, lot).map((area) => (area > 0 ? area : NaN));
+  return fromSurfaces(absorption, volume, own, lot).map((area) => (area >= LEAST_AREA ? area : NaN));
 }
 
 /** Schroeder's frequency 2000 sqrt(T/V), Hz, at the mean decay of 500 Hz and 1 kHz; null where it is not known. */

@@ -64,14 +64,21 @@ describe("a save that does not go through", () => {
     expect(field.getAttribute("aria-invalid")).toBe("true");
   });
 
-  it("says so when the reader is signed out, with the way back to this door", async () => {
-    answerWith({ status: 401, body: { error: { message: "You are signed out." } } });
+  it("keeps the change when the reader is signed out: sign in beside the page, then save again", async () => {
+    const sent = answerWith(
+      { status: 401, body: { error: { message: "You are signed out." } } },
+      { status: 200, body: heavyAnswer() },
+    );
     const user = show("yard-door");
     await markHeavy(user);
     await user.keyboard("{Enter}");
     const alert = await screen.findByRole("alert");
     const link = within(alert).getByRole("link", { name: "Sign in again" });
     expect(link.getAttribute("href")).toBe("/sign-in?next=%2Fprojects%2Fp1%2Fwalls%2Fyard-door");
+    expect(link.getAttribute("target")).toBe("_blank");
+    await user.click(within(alert).getByRole("button", { name: "Save again" }));
+    await waitFor(() => expect(screen.queryByRole("alert")).toBeNull());
+    expect(sent.mock.calls[1]![1].body).toBe(sent.mock.calls[0]![1].body);
   });
 
   it("offers the same change again when the server did not answer", async () => {

@@ -133,3 +133,13 @@ describe("nine bands", () => {
     expect(ear.levels).toHaveLength(9);
   });
 });
+
+describe("a room of which nothing absorbs anything to speak of", () => {
+  const dead = { ...buildCase().rooms[0], absorption: { surfaces: [{ area: 0.03, alpha: flat(1e-300) }], air: false } };
+  test("has no level, and blocks a pass", () => {
+    const rooms = buildCase().rooms.map((room: { id: string }) => (room.id === dead.id ? dead : room));
+    const bed = bedWith({ rooms });
+    expect(bed.levels.every((level) => level === "unknown")).toBe(true);
+    expect(bed.state).toBe("not weighed");
+  });
+});
