@@ -2,7 +2,17 @@
 export const projectsAddress = "/projects";
 export const budgetAddress = (projectId: string) => `/projects/${projectId}`;
 export const wallsAddress = (projectId: string) => `${budgetAddress(projectId)}/walls`;
+export const yardAddress = (projectId: string) => `${budgetAddress(projectId)}/yard`;
+export const roomsAddress = (projectId: string) => `${budgetAddress(projectId)}/rooms`;
+export const sourcesAddress = (projectId: string) => `${budgetAddress(projectId)}/sources`;
+export const limitsAddress = (projectId: string) => `${budgetAddress(projectId)}/limits`;
 export const elementAddress = (projectId: string, elementId: string) => `${wallsAddress(projectId)}/${elementId}`;
+
+export const landingAddress = "/";
+export const signUpAddress = "/sign-up";
+export const forgottenAddress = "/forgotten-password";
+export const accountAddress = "/account";
+export const newProjectAddress = "/projects/new";
 
 /** The sign-in page; `next` is where the reader wanted to go. */
 export function signInAddress(next?: string): string {
@@ -20,6 +30,9 @@ export const meRoute = "/api/me";
 export const projectRouteAddress = (projectId: string) => `/api/projects/${projectId}`;
 export const verdictRoute = (projectId: string, receiverId: string) =>
   `${projectRouteAddress(projectId)}/verdict/${receiverId}`;
+
+export const changesRoute = (projectId: string) => `${projectRouteAddress(projectId)}/changes`;
+export const projectsRoute = "/api/projects";
 
 /** A kind of part, or one part of it: "elements", "receivers" ... */
 export function partRoute(projectId: string, part: string, id?: string): string {

@@ -9,6 +9,8 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
   declare name: string;
   declare passwordHash: string;
   declare theme: CreationOptional<"light" | "dark" | "system">;
+  declare units: CreationOptional<"metric" | "us">;
+  declare decimalMark: CreationOptional<"point" | "comma">;
   declare createdAt: CreationOptional<Date>;
 }
 
@@ -19,6 +21,8 @@ User.init(
     name: text(),
     passwordHash: text(),
     theme: filled(text()),
+    units: filled(text()),
+    decimalMark: filled(text()),
     createdAt: filled(moment()),
   },
   { sequelize: connection, modelName: "User", tableName: "users" },

@@ -13,6 +13,8 @@ export interface Reader {
   name: string;
   email: string;
   theme: "light" | "dark" | "system";
+  /** How the reader wants figures shown. */
+  figures: { units: "metric" | "us"; mark: "point" | "comma" };
   session: { idHash: string; keep: boolean; toRenew: boolean };
 }
 
@@ -36,6 +38,7 @@ export async function identify(seal: string | undefined): Promise<Reader | undef
     name: user.name,
     email: user.email,
     theme: user.theme,
+    figures: { units: user.units, mark: user.decimalMark },
     session: { idHash, keep, toRenew: isToRenew(session, now) },
   };
 }

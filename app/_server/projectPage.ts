@@ -22,7 +22,7 @@ export interface ProjectFacts {
 }
 
 export interface OpenedPage {
-  user: { name: string; email: string; theme: Reader["theme"] };
+  user: { name: string; email: string; theme: Reader["theme"]; figures: Reader["figures"] };
   project: ProjectFacts;
   people: Person[];
   may: { edit: boolean; reason: string };
@@ -64,7 +64,7 @@ async function pageOf(reader: Reader, projectId: string): Promise<OpenedPage> {
   });
   const edit = rightOf(opened.roles, "edit plan")?.right === "may" && !opened.project.archivedAt;
   return {
-    user: { name: reader.name, email: reader.email, theme: reader.theme },
+    user: { name: reader.name, email: reader.email, theme: reader.theme, figures: reader.figures },
     project: facts(opened.project),
     people,
     roles: opened.roles,

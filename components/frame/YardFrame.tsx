@@ -1,17 +1,27 @@
 import type { ReactNode } from "react";
 import { KeepFresh } from "../state/KeepFresh";
-import { budgetAddress, projectsAddress, wallsAddress } from "../addresses";
+import { budgetAddress, limitsAddress, projectsAddress, roomsAddress, sourcesAddress, wallsAddress, yardAddress } from "../addresses";
+import { FiguresProvider, type Figures } from "../ui/figures";
 import { Beam } from "./Beam";
 import { Header } from "./Header";
 import { Page } from "./Page";
 import { PhoneBar } from "./PhoneBar";
 import type { Stage } from "./stages";
 
-export type YardStage = "walls" | "budget";
+/** Stages of a yard in the order of the beam; any may be visited first. */
+const STAGES = [
+  { key: "yard", label: "Yard", address: yardAddress },
+  { key: "rooms", label: "Rooms", address: roomsAddress },
+  { key: "sources", label: "Sources", address: sourcesAddress },
+  { key: "walls", label: "Walls & openings", short: "Walls", address: wallsAddress },
+  { key: "limits", label: "Limits", address: limitsAddress },
+  { key: "budget", label: "Budget", address: budgetAddress },
+] as const;
+export type YardStage = (typeof STAGES)[number]["key"];
 
 interface Props {
   project: { id: string; name: string; stage: string };
-  user: { name: string; email: string; theme: "light" | "dark" | "system" };
+  user: { name: string; email: string; theme: "light" | "dark" | "system"; figures: Figures };
   stage: YardStage;
   /** Of the plan the page shows. */
   revision: number;
@@ -22,10 +32,7 @@ interface Props {
 }
 
 function stagesOf(projectId: string, current: YardStage): Stage[] {
-  return [
-    { href: wallsAddress(projectId), label: "Walls & openings", short: "Walls", current: current === "walls" },
-    { href: budgetAddress(projectId), label: "Budget", current: current === "budget" },
-  ];
+  return STAGES.map(({ key, label, address, ...names }) => ({ href: address(projectId), label, ...names, current: key === current }));
 }
 
 /** Head, beam and page of every stage of a yard. */
@@ -43,7 +50,9 @@ export function YardFrame({ project, user, stage, revision, skipTo, skipWords, c
       >
         <Beam stages={stages} />
       </Header>
-      <Page bar>{children}</Page>
+      <Page bar>
+        <FiguresProvider value={user.figures}>{children}</FiguresProvider>
+      </Page>
       <PhoneBar stages={stages} />
       <KeepFresh revision={revision} />
     </>

@@ -1,4 +1,4 @@
-import { partRoute, projectRouteAddress } from "../addresses";
+import { changesRoute, partRoute, projectRouteAddress } from "../addresses";
 import type { Answer } from "../state/plan";
 
 /** What happened to one part of a plan. */
@@ -52,6 +52,20 @@ export function removePart({ id, ...written }: Written & { id: string }): Promis
 export function addPart({ values, ...written }: Written & { values: Values }): Promise<Saved> {
   const address = partRoute(written.projectId, written.part);
   return write({ method: "POST", address, body: values }, written.revision, () => false);
+}
+
+/** One change of a plan. `as` names a part that is added, "new:room", so that later changes of the list point at it. */
+export type PlanChange =
+  | { act: "add"; part: string; values: Values; as?: `new:${string}` }
+  | { act: "change"; part: string; id: string; patch: Values }
+  | { act: "remove"; part: string; id: string };
+
+/** Several changes as one: all of them or none. Sent again by itself only where nobody touched what it touches. */
+export function saveChanges({ projectId, revision, changes }: { projectId: string; revision: number; changes: readonly PlanChange[] }): Promise<Saved> {
+  const ids = changes.flatMap((change) => (change.act === "add" ? [] : [change.id]));
+  const removes = changes.some(({ act }) => act === "remove");
+  const collides = (touched: ReadonlySet<string>) => removes || ids.some((id) => touched.has(id));
+  return write({ method: "POST", address: changesRoute(projectId), body: { changes } }, revision, collides);
 }
 
 /** Renames, archives or restores a yard. */

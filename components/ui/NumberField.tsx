@@ -3,6 +3,7 @@
 import clsx from "clsx";
 import { useId, useState, type KeyboardEvent, type ReactNode } from "react";
 import { formatQuantity, parseNumber, withUnit } from "../format";
+import { useFigures, withMark } from "./figures";
 import { borderOf, describe, FieldFrame, inputClasses } from "./FieldFrame";
 
 interface Props {
@@ -26,7 +27,6 @@ interface Props {
   className?: string;
 }
 
-const show = (value: number | null | undefined) => (value === null || value === undefined ? "" : formatQuantity(value));
 
 /** 0.1 + 0.2 is 0.3 here: a step never adds decimals of its own. */
 function addStep(value: number, change: number, step: number): number {
@@ -55,6 +55,9 @@ function refuse(text: string, { min, max, unit = "", optional }: Props): string 
 export function NumberField(props: Props) {
   const { label, value, unit, step = 1, hint, error, caution, onCommit, name, className } = props;
   const id = useId();
+  const { mark } = useFigures();
+  const show = (figure: number | null | undefined) =>
+    figure === null || figure === undefined ? "" : withMark(formatQuantity(figure), mark);
   const [stored, setStored] = useState(value);
   const [text, setText] = useState(show(value));
   const [complaint, setComplaint] = useState<string>();

@@ -4,9 +4,9 @@ import { useAtom, useSetAtom, useStore } from "jotai";
 import { useRef, useState } from "react";
 import { savePart, type Saved } from "../plan/save";
 import { answerAtom, savingAtom, type Answer } from "../state/plan";
-import { agoWords } from "./agoWords";
+import { agoWords } from "../plan/agoWords";
 import { fieldOf, type ElementPatch, type FieldName } from "./patches";
-import type { Trouble } from "./SaveTrouble";
+import type { Trouble } from "../plan/SaveTrouble";
 
 export interface Conflict {
   patch: ElementPatch;

@@ -54,6 +54,12 @@ const table: Record<string, Row> = {
     params: (stage) => ({ ...project(stage), part: "fences" }),
     body: fence,
   },
+  "POST /api/projects/[projectId]/changes": {
+    act: "edit plan",
+    statuses: changing,
+    params: project,
+    body: (stage) => ({ changes: [{ act: "add", part: "fences", values: fence(stage) }] }),
+  },
   "PATCH /api/projects/[projectId]/[part]/[partId]": {
     act: "edit plan",
     statuses: changing,

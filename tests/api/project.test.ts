@@ -51,7 +51,7 @@ describe("a yard", () => {
 });
 
 describe("the list of yards", () => {
-  const readerOf = ({ id, name, email }: User): Reader => ({ id, name, email, theme: "system", session: { idHash: "", keep: false, toRenew: false } });
+  const readerOf = ({ id, name, email }: User): Reader => ({ id, name, email, theme: "system", figures: { units: "metric", mark: "point" }, session: { idHash: "", keep: false, toRenew: false } });
   const namesFor = async (user: User) => (await listProjects(readerOf(user))).map(({ project }) => project.id).sort();
 
   it("holds all of the team for its members, the invited ones for others, and none of a stranger's", async () => {

@@ -1,7 +1,7 @@
 import { cleanup, render, screen, within } from "@testing-library/react";
 import fc from "fast-check";
 import { afterEach, describe, expect, it } from "vitest";
-import { agoWords } from "@/components/walls/agoWords";
+import { agoWords } from "@/components/plan/agoWords";
 import { choicesFor } from "@/components/walls/choices";
 import { LossChart } from "@/components/walls/LossChart";
 import { basisSentence } from "@/components/walls/LossTable";
