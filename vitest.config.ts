@@ -47,6 +47,7 @@ export default defineConfig({
           environment: "node",
           include: ["tests/journeys/**/*.test.ts"],
           globalSetup: ["tests/served.ts"],
+          setupFiles: ["tests/ownProduct.ts"],
           fileParallelism: false,
           testTimeout: 120_000,
           hookTimeout: 120_000,

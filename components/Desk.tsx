@@ -3,7 +3,7 @@
 import clsx from "clsx";
 import { useAtomValue } from "jotai";
 import { useEffect, useRef, useState } from "react";
-import { elementAddress } from "./addresses";
+import { elementAddress, limitsAddress } from "./addresses";
 import { answerAtom, type Answer } from "./state/plan";
 import { PlanProvider } from "./state/PlanProvider";
 import { SmallBeam } from "./marks/SmallBeam";
@@ -57,6 +57,11 @@ function SlabActions({ projectId, lit, mayEdit, open, onDoubts }: Omit<Props, "a
           {mayEdit ? tryWords(lever) : `Open ${inSentence(lever.name)}`}
         </LinkButton>
       )}
+      {reading.weighed.metric === "none" && (
+        <LinkButton look="lamp" href={limitsAddress(projectId)}>
+          Choose a limit
+        </LinkButton>
+      )}
       <Button aria-expanded={open} aria-controls={DOUBTS} onClick={onDoubts}>
         How sure is this?
       </Button>
@@ -65,12 +70,13 @@ function SlabActions({ projectId, lit, mayEdit, open, onDoubts }: Omit<Props, "a
 }
 
 /** The shape of the answer, before there is anybody to weigh it for. */
-function NobodyListens() {
+function NobodyListens({ projectId }: { projectId: string }) {
   return (
     <section aria-labelledby="listening" className="mt-3 rounded-sheet border-[1.5px] border-dashed border-edge bg-sheet p-4 mid:mt-5 mid:p-6.5">
       <h2 id="listening" className="mb-3 text-section">Who is listening</h2>
       <SmallBeam state="not weighed" margin={null} />
-      <p className="mt-2 text-ink2">No one yet, so there is no limit to hold the levels against.</p>
+      <p className="mt-2 mb-4 text-ink2">No one yet, so there is no limit to hold the levels against.</p>
+      <LinkButton look="ink" href={limitsAddress(projectId)}>Add a listener to weigh it</LinkButton>
     </section>
   );
 }
@@ -79,7 +85,7 @@ function Panels({ projectId, lit }: { projectId: string; lit: Lit }) {
   const listeners = useListeners();
   const chartFirst = [720, 1024].includes(useWidthClass());
   const { reading, column } = lit;
-  if (!reading || !column) return <NobodyListens />;
+  if (!reading || !column) return <NobodyListens projectId={projectId} />;
   const chart = (
     <div key="chart" className="min-w-0 border-rule max-mid:border-t mid:max-wide:col-span-2 mid:max-wide:border-b wide:border-x">
       <ChartPanel lit={lit} reading={reading} column={column} />

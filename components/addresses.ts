@@ -10,6 +10,7 @@ export const elementAddress = (projectId: string, elementId: string) => `${walls
 
 export const landingAddress = "/";
 export const signUpAddress = "/sign-up";
+export const checkMailAddress = "/check-mail";
 export const forgottenAddress = "/forgotten-password";
 export const accountAddress = "/account";
 export const newProjectAddress = "/projects/new";
@@ -27,6 +28,17 @@ export function ownAddress(next: string | undefined): string {
 
 export const sessionRoute = "/api/session";
 export const meRoute = "/api/me";
+export const signUpRoute = "/api/sign-up";
+export const emailCheckRoute = "/api/email-check";
+export const forgottenRoute = "/api/forgotten-password";
+export const newPasswordRoute = "/api/new-password";
+export const passwordRoute = "/api/password";
+export const proofRoute = "/api/proof";
+export const emailRoute = "/api/email";
+export const emailMoveRoute = "/api/email-move";
+export const emailUndoRoute = "/api/email-undo";
+export const sessionsRoute = "/api/sessions";
+export const deviceRoute = (key: string) => `${sessionsRoute}/${encodeURIComponent(key)}`;
 export const projectRouteAddress = (projectId: string) => `/api/projects/${projectId}`;
 export const verdictRoute = (projectId: string, receiverId: string) =>
   `${projectRouteAddress(projectId)}/verdict/${receiverId}`;

@@ -8,10 +8,14 @@ export class Session extends Model<InferAttributes<Session>, InferCreationAttrib
   declare userId: string;
   declare keep: boolean;
   declare device: CreationOptional<string>;
+  /** Its name on the list of devices; it stays through a change of id and opens nothing. */
+  declare handle: CreationOptional<string>;
   declare beganAt: CreationOptional<Date>;
   declare issuedAt: CreationOptional<Date>;
   declare seenAt: CreationOptional<Date>;
   declare replacedAt: CreationOptional<Date | null>;
+  /** When the password was last given in it. */
+  declare provedAt: CreationOptional<Date>;
 }
 
 Session.init(
@@ -20,10 +24,12 @@ Session.init(
     userId: uuid(),
     keep: boolean(),
     device: filled(text()),
+    handle: filled(uuid()),
     beganAt: filled(moment()),
     issuedAt: filled(moment()),
     seenAt: filled(moment()),
     replacedAt: optionalMoment(),
+    provedAt: filled(moment()),
   },
   { sequelize: connection, modelName: "Session", tableName: "sessions" },
 );

@@ -1,5 +1,5 @@
 import { type CreationOptional, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
-import { filled, key, moment, text, uuid } from "./columns";
+import { filled, key, moment, optionalMoment, text, uuid } from "./columns";
 import { connection } from "./connection";
 
 /** A person with an account. The e-mail address is kept in small letters. */
@@ -11,6 +11,10 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
   declare theme: CreationOptional<"light" | "dark" | "system">;
   declare units: CreationOptional<"metric" | "us">;
   declare decimalMark: CreationOptional<"point" | "comma">;
+  /** What brought them here: to play, to advise or to build. */
+  declare hat: CreationOptional<"play" | "advise" | "build">;
+  /** When they showed that the address is theirs; nobody signs in before. */
+  declare emailCheckedAt: CreationOptional<Date | null>;
   declare createdAt: CreationOptional<Date>;
 }
 
@@ -23,6 +27,8 @@ User.init(
     theme: filled(text()),
     units: filled(text()),
     decimalMark: filled(text()),
+    hat: filled(text()),
+    emailCheckedAt: optionalMoment(),
     createdAt: filled(moment()),
   },
   { sequelize: connection, modelName: "User", tableName: "users" },

@@ -1,3 +1,4 @@
+import { limitLevels } from "../lib/noise/criteria";
 import { criterionRecords, finishRecords, sourceRecords } from "../lib/noise/library";
 import type { PartKind } from "../lib/noise/plan";
 import { PartFault } from "./PartFault";
@@ -11,6 +12,8 @@ interface Library {
   figures: readonly string[];
   /** What stands beside figures that somebody typed over: no longer the record's word. */
   typed: Values;
+  /** What is written down with the figures, so that later editions of a table change nothing. */
+  freeze?: (values: Values) => Values;
 }
 
 const own = { provenance: { document: "Own figures", clause: "", memory: false } };
@@ -43,8 +46,18 @@ const libraries: Partial<Record<PartKind, Library>> = {
     },
     figures: ["metric", "value", "levels", "edition"],
     typed: own,
+    freeze: withLevels,
   },
 };
+
+/** A limit by its number keeps the levels that its edition gives it today. */
+function withLevels(values: Values): Values {
+  const { metric, value, levels = null, edition = "" } = values;
+  const numbered = (metric === "NC" || metric === "NR") && typeof value === "number" && typeof edition === "string";
+  if (!numbered || levels !== null) return values;
+  const curve = Array.from(limitLevels({ metric, value, levels: null, edition }), (level) => (Number.isNaN(level) ? null : level));
+  return { ...values, levels: curve };
+}
 
 /**
  * What was asked for a part, with the figures of the library's record where one is named (`libraryKey`). Figures that are
@@ -53,6 +66,11 @@ const libraries: Partial<Record<PartKind, Library>> = {
 export function filledIn(kind: PartKind, asked: Values): Values {
   const library = libraries[kind];
   if (!library) return asked;
+  const { freeze = (values) => values } = library;
+  return freeze(filledFrom(library, asked));
+}
+
+function filledFrom(library: Library, asked: Values): Values {
   const { libraryKey, ...values } = asked;
   if (libraryKey === undefined) return library.figures.some((field) => field in values) ? { ...library.typed, ...values } : values;
   const typedOver = [...library.figures, "provenance"].filter((field) => field in values);

@@ -14,7 +14,7 @@ export { advancePlan } from "./advancePlan";
 export { fieldWords } from "./checkPart";
 export { PartFault } from "./PartFault";
 export { partKindOf, partKinds, partTables, type Place } from "./partTables";
-export { planOf, readPlan, type Damage, type StoredPlan } from "./planOf";
+export { bareLot, planOf, readPlan, type Damage, type StoredPlan } from "./planOf";
 export { removePart } from "./removePart";
 export type { Act } from "./Revision";
 

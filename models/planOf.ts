@@ -61,7 +61,7 @@ function standsWhole(kind: PartKind, part: PlanPart, standing: ReadonlyMap<strin
 }
 
 /** Ground of a project that has none: nothing drawn, middling ground, air of ISO 9613-1's reference conditions. */
-const bareLot = (id: string): Plan["lot"] =>
+export const bareLot = (id: string): Plan["lot"] =>
   partSchemas.lot.parse({
     id,
     outline: null,

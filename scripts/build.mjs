@@ -9,7 +9,7 @@ import { Sentence } from "./sentence.mjs";
 /** All a build reads. */
 const sources = [
   "app", "components", "data", "lib", "models", "public", "scripts/headers.mjs",
-  "next.config.mjs", "package-lock.json", "postcss.config.mjs", "proxy.ts", "tailwind.config.ts", "tsconfig.json",
+  "instrumentation.ts", "next.config.mjs", "package-lock.json", "postcss.config.mjs", "proxy.ts", "tailwind.config.ts", "tsconfig.json",
 ];
 
 /** Builds when the sources changed since the last build; gives the folder to serve from. */

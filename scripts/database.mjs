@@ -23,5 +23,7 @@ export async function prepareDatabase(environment, { demo }) {
   const verbs = demo ? ["up", "seed"] : ["up"];
   const args = ["--conditions=react-server", "--import", "tsx", "scripts/migrate.ts", ...verbs];
   const code = await run(process.execPath, args, { cwd: root, env: { ...process.env, ...environment } });
-  if (code !== 0) throw new Sentence("The database could not be brought up to date.");
+  if (code === 0) return;
+  const named = process.env.DATABASE_URL ? " It is the one that DATABASE_URL names: is it running, and may its role make tables?" : "";
+  throw new Sentence(`The database could not be brought up to date; the reason stands above.${named}`);
 }

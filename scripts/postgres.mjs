@@ -28,20 +28,20 @@ export async function startCluster() {
   return { url: addressOf(cluster, port, "stillyard"), folder, stop: () => halt(cluster) };
 }
 
-/** Starts a cluster for tests in the temporary folder: quick, not durable, gone after `stop`. */
-export async function startPassingCluster() {
+/** Starts a cluster for tests in the temporary folder: quick, gone after `stop`, and durable only where a test kills it. */
+export async function startPassingCluster({ durable = false } = {}) {
   const account = serverAccount();
   const parent = passingParent(account);
   await sweepPassingClusters(account, parent);
   const folder = mkdtempSync(join(parent, passingPrefix));
   writeFileSync(join(folder, "owner.json"), JSON.stringify({ pid: process.pid, born: birthOf(process.pid) }));
   if (account) chownSync(folder, account.uid, account.gid);
-  const cluster = describe({ account, folder, adminPassword: "passing", ownerPassword: "passing", durable: false });
+  const cluster = describe({ account, folder, adminPassword: "passing", ownerPassword: "passing", durable });
   await createCluster(cluster);
   const port = await launch(cluster);
   await createOwner(cluster, port);
   const stop = async () => (await halt(cluster), rmSync(folder, { recursive: true, force: true }));
-  return { adminUrl: addressOf(cluster, port, "postgres"), url: addressOf(cluster, port, "stillyard"), stop };
+  return { adminUrl: addressOf(cluster, port, "postgres"), url: addressOf(cluster, port, "stillyard"), data: cluster.data, stop };
 }
 
 /** Ends and removes test clusters whose maker was killed. */

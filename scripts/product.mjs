@@ -6,11 +6,15 @@ import { freePort } from "./port.mjs";
 import { productEnvironment, secretsFresh } from "./secrets.mjs";
 import { Sentence } from "./sentence.mjs";
 
-/** Serves the built product with the demo on a free port, in a process of its own, for journeys and proofs. */
-export async function serveForTests({ databaseUrl, folder }) {
-  const port = await freePort();
+/**
+ * @param {{ databaseUrl: string, folder: string | undefined, port?: number, secrets?: ReturnType<typeof secretsFresh> }} given
+ * Serves the built product with the demo on a free port, in a process of its own, for journeys and proofs. Its
+ * `environment` lets a test write sessions that the product takes for its own.
+ */
+export async function serveForTests({ databaseUrl, folder, port: wanted, secrets = secretsFresh() }) {
+  const port = wanted ?? (await freePort());
   const environment = {
-    ...productEnvironment({ secrets: secretsFresh(), databaseUrl, port }),
+    ...productEnvironment({ secrets, databaseUrl, port }),
     STILLYARD_BUILD_FOLDER: folder,
     STILLYARD_ORIGIN: `http://localhost:${port}`,
   };
@@ -19,5 +23,5 @@ export async function serveForTests({ databaseUrl, folder }) {
   const gone = new Promise((resolve) => child.once("exit", resolve));
   const ready = await Promise.race([new Promise((resolve) => child.once("message", () => resolve(true))), gone.then(() => false)]);
   if (!ready) throw new Sentence("The product could not be served for the tests.");
-  return { address: environment.STILLYARD_ORIGIN, pid: child.pid, stop: async () => (child.kill("SIGTERM"), await gone) };
+  return { address: environment.STILLYARD_ORIGIN, environment, pid: child.pid, stop: async () => (child.kill("SIGTERM"), await gone) };
 }

@@ -34,7 +34,7 @@ async function prove() {
   const { adminUrl, url } = await begun.cluster;
   begun.product = serveForTests({ databaseUrl: url, folder });
   const { address } = await begun.product;
-  const counts = await runVitest(["proof"], { DATABASE_ADMIN_URL: adminUrl, STILLYARD_URL: address }, chosen);
+  const counts = await runVitest(["proof"], { DATABASE_ADMIN_URL: adminUrl, STILLYARD_URL: address, STILLYARD_BUILD_FOLDER: folder }, chosen);
   console.log(`Proofs: ${counts.passed} passed, ${counts.failed} failed`);
   return counts.failed === 0 ? 0 : 1;
 }

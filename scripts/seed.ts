@@ -60,8 +60,8 @@ async function removeDemo(people: DemoPerson[], team: DemoTeam, transaction: Tra
 
 async function addPeople(people: DemoPerson[], hashes: string[], transaction: Transaction) {
   for (const [place, { key, name, email }] of people.entries()) {
-    const user = { id: idOf("person", key), name, email, passwordHash: hashes[place]! };
-    await User.create(user, { fields: ["id", "name", "email", "passwordHash"], transaction });
+    const user = { id: idOf("person", key), name, email, passwordHash: hashes[place]!, emailCheckedAt: new Date() };
+    await User.create(user, { fields: ["id", "name", "email", "passwordHash", "emailCheckedAt"], transaction });
   }
 }
 

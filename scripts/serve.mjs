@@ -2,6 +2,7 @@ import { createServer, STATUS_CODES } from "node:http";
 import { pathToFileURL } from "node:url";
 import { isLoopback, isTrustworthy, sealedPolicy, securityHeaders, strictTransport } from "./headers.mjs";
 import { root } from "./places.mjs";
+import { routerStateReader } from "./routerState.mjs";
 import { Sentence, tellFault } from "./sentence.mjs";
 
 const longestAddress = 2048;
@@ -28,15 +29,16 @@ const methods = new Set(["GET", "HEAD", "POST", "PUT", "PATCH", "DELETE", "OPTIO
 /**
  * Opens the product's http server around a handler: sizes, times, the client's address, an orderly end.
  * `trustedHop` is the address of a forwarding server whose last word on the client's address is believed.
- * Only a server under development has use for `upgrades`, sockets that become channels of their own.
+ * Only a server under development has use for `upgrades`, sockets that become channels of their own. `reads` tells
+ * whether the handler can read the headers of a request.
  */
-export async function openServer({ handler, port, host, origin, trustedHop, answerWithin = 30_000, upgrades = false }) {
+export async function openServer({ handler, port, host, origin, trustedHop, answerWithin = 30_000, upgrades = false, reads = () => true }) {
   const always = { ...securityHeaders, ...(isTrustworthy(origin) ? { "Strict-Transport-Security": strictTransport } : {}) };
   const limits = { maxHeaderSize: 16_384, headersTimeout: 10_000, requestTimeout: 30_000, connectionsCheckingInterval: 1_000 };
   const server = createServer({ ...limits, keepAliveTimeout: 5_000 }, async (request, response) => {
     for (const [name, value] of Object.entries(always)) response.setHeader(name, value);
     fillIn(response);
-    const refused = refusalOf(request);
+    const refused = refusalOf(request) ?? (reads(request.headers) ? undefined : 400);
     if (refused) return refuse(response, refused);
     nameTheClient(request, trustedHop);
     const late = setTimeout(() => response.headersSent || refuse(response, 503), answerWithin);
@@ -168,6 +170,7 @@ export async function serveProduct({ developing = false, ready } = {}) {
   const { default: next } = await import("next");
   const port = Number(process.env.PORT);
   const origin = process.env.STILLYARD_ORIGIN;
+  const mail = await namePostOffice(origin);
   const app = next({ dev: developing, dir: root, hostname: "localhost", port });
   await Promise.all([app.prepare(), ready]);
   const server = await openServer({
@@ -179,8 +182,25 @@ export async function serveProduct({ developing = false, ready } = {}) {
     // A page may have to be compiled first.
     answerWithin: developing ? 180_000 : undefined,
     upgrades: developing,
+    reads: await routerStateReader(),
   });
-  return { stop: async () => (await server.drain(), await app.close()) };
+  const stop = async () => {
+    await server.drain();
+    // Started by the framework as it woke up: the job in hand ends or is handed back.
+    await globalThis.stillyardJobs?.stop();
+    await app.close();
+    await mail?.stop();
+  };
+  return { stop, inbox: mail && `${origin}/local-inbox` };
+}
+
+/** Where no mail server is named and nobody else can open the product, it has one of its own. */
+async function namePostOffice(origin) {
+  if (process.env.STILLYARD_SMTP || !isLoopback(origin)) return undefined;
+  const { openLocalMail } = await import("./localMail.mjs");
+  const mail = await openLocalMail();
+  process.env.STILLYARD_SMTP = mail.url;
+  return mail;
 }
 
 /** Ends the process in order on the first signal. A terminal and npm may both pass the same one on: repeats are ignored. */

@@ -54,10 +54,12 @@ async function start() {
   const ready = prepareDatabase(environment, { demo });
   Object.assign(process.env, environment);
   begun.product = serveProduct({ developing, ready });
-  await begun.product;
+  const { inbox } = await begun.product;
   begun.lock.tell({ origin, port, serving: true });
   console.log(`\nStillyard is ready: ${origin}\n`);
   if (demo) printSignIns();
+  if (inbox) console.log(`Mail is not sent but kept here: ${inbox}\n`);
+  else if (!process.env.STILLYARD_SMTP) console.log("Mail waits: no server is named for it (STILLYARD_SMTP).\n");
   console.log("Stop it with Ctrl-C.");
 }
 

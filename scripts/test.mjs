@@ -6,7 +6,6 @@ import { ensurePackages } from "./packages.mjs";
 import { root } from "./places.mjs";
 import { startPassingCluster } from "./postgres.mjs";
 import { ensurePostgres } from "./postgresPrograms.mjs";
-import { serveForTests } from "./product.mjs";
 import { endRuns, runGroup } from "./run.mjs";
 import { tellFault } from "./sentence.mjs";
 import { endOnSignal } from "./serve.mjs";
@@ -16,11 +15,10 @@ const quick = process.argv.includes("--quick");
 const chromium = "/usr/bin/chromium";
 
 const total = { passed: 0, failed: 0, skipped: 0 };
-const begun = { cluster: undefined, product: undefined };
+const begun = { cluster: undefined };
 
 const end = endOnSignal(async () => {
   endRuns();
-  await (await begun.product?.catch(() => undefined))?.stop();
   await (await begun.cluster?.catch(() => undefined))?.stop();
   if (total.skipped) console.log(`${total.skipped} skipped`);
   console.log(`Tests: ${total.passed} passed, ${total.failed} failed`);
@@ -41,18 +39,17 @@ async function testAll() {
   await step("Types", checkTypes);
   await step("Lint", () => node("node_modules/eslint/bin/eslint.js", ".", "--max-warnings", "0"));
   begun.cluster = startPassingCluster();
-  const { adminUrl, url } = await begun.cluster;
+  const { adminUrl } = await begun.cluster;
   add(await runVitest(["unit", "database", "components"], { DATABASE_ADMIN_URL: adminUrl }));
-  if (!quick) await testInBrowser(url);
+  if (!quick) await testInBrowser(adminUrl);
 }
 
-async function testInBrowser(databaseUrl) {
+/** Every journey starts a product of its own from the one build. */
+async function testInBrowser(adminUrl) {
   const folder = buildFolderForTests();
   const built = await step("Build", () => ensureBuild(folder).then(() => 0));
   if (!built) return console.error("The journeys were not run: there is no build.");
-  begun.product = serveForTests({ databaseUrl, folder });
-  const { address } = await begun.product;
-  add(await runVitest(["journeys"], { STILLYARD_URL: address }));
+  add(await runVitest(["journeys"], { DATABASE_ADMIN_URL: adminUrl, STILLYARD_BUILD_FOLDER: folder }));
 }
 
 /** Types of pages and routes are written first; left-overs of routes that are gone would be read as errors. */

@@ -12,10 +12,10 @@ export async function buildTeam(): Promise<Team> {
   return Team.create({ id: randomUUID(), name: "A team" }, { fields: ["id", "name"] });
 }
 
-export async function buildUser(values: Partial<{ name: string; email: string; passwordHash: string }> = {}): Promise<User> {
+export async function buildUser(values: Partial<{ name: string; email: string; passwordHash: string; emailCheckedAt: Date | null }> = {}): Promise<User> {
   const id = randomUUID();
-  const user = { id, name: "Somebody", email: `${id}@stillyard.example`, passwordHash: "none", ...values };
-  return User.create(user, { fields: ["id", "name", "email", "passwordHash"] });
+  const user = { id, name: "Somebody", email: `${id}@stillyard.example`, passwordHash: "none", emailCheckedAt: new Date(), ...values };
+  return User.create(user, { fields: ["id", "name", "email", "passwordHash", "emailCheckedAt"] });
 }
 
 export async function buildMember(team: Team, role: "owner" | "acoustician", name = "Somebody"): Promise<User> {

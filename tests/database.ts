@@ -2,9 +2,14 @@ import { randomUUID } from "node:crypto";
 import pg from "pg";
 
 /** Makes a database with the whole schema and no rows, and gives its address. It goes with the cluster. */
-export async function createDatabase(): Promise<string> {
+export const createDatabase = () => makeDatabase("template template_app");
+
+/** Makes a database that nobody has prepared, and gives its address. */
+export const createEmptyDatabase = () => makeDatabase("");
+
+async function makeDatabase(how: string): Promise<string> {
   const name = `t_${randomUUID().replaceAll("-", "")}`;
-  await asAdmin(`create database ${name} template template_app`);
+  await asAdmin(`create database ${name} ${how}`);
   return Object.assign(new URL(adminAddress()), { pathname: `/${name}` }).href;
 }
 

@@ -10,10 +10,12 @@ type Row = Partial<Record<Role, Right>>;
 const everyone: Row = { owner: "may", acoustician: "may", client: "may", builder: "may" };
 const team: Row = { owner: "may", acoustician: "may", client: "refused", builder: "refused" };
 
-/** Who may do what in a project: one row per act. Asked in `openProject` only. */
+/** Who may do what: one row per act. Asked in `openProject`, and for a yard that is not there yet in `openTeam`. */
 export const acts = {
+  "make project": team,
   "open project": everyone,
   "rename project": team,
+  "copy project": team,
   "edit plan": team,
   "set limit": team,
 } as const satisfies Record<string, Row>;

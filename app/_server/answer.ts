@@ -4,6 +4,7 @@ import { readSeal, setCookie } from "./cookies";
 import { answerError, Refusal } from "./errors";
 import { log } from "./log";
 import { identify, renewSession, type Reader } from "./identity";
+import { countRequest } from "./rates";
 
 /** Answers a request, or says in words why not; every answer is for its asker alone. */
 export async function answer(work: () => Promise<Response>): Promise<Response> {
@@ -23,9 +24,11 @@ export function emptyAnswer(headers: Record<string, string> = {}): Response {
   return new Response(null, { status: 204, headers: { "Cache-Control": "private, no-store", ...headers } });
 }
 
+/** Who asks; nobody is refused, and so is who asks too often. */
 export async function requireReader(request: Request): Promise<Reader> {
   const reader = await identify(readSeal(request));
   if (!reader) throw new Refusal("signed out", "You are signed out. Sign in again; what you typed stays here.");
+  await countRequest(reader.session.idHash, request.method);
   return reader;
 }
 

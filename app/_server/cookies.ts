@@ -5,6 +5,8 @@ import { env } from "./env";
 
 /** Days a browser keeps the cookie of somebody who stays signed in; the session's own row decides earlier. */
 const KEPT_DAYS = 30;
+/** The longest that browsers keep any cookie. */
+const BROWSER_DAYS = 400;
 
 /** `__Host-` holds the cookie to this very address, but browsers refuse it where the address is not secure. */
 export function cookieName(): string {
@@ -31,19 +33,29 @@ export async function unsealId(seal: string | undefined): Promise<string | undef
   }
 }
 
-export function readSeal(request: Request): string | undefined {
-  const start = `${cookieName()}=`;
+/** The cookie by which a browser is known again after it signed in once; it opens nothing. */
+export const browserCookieName = () => `${cookieName()}-browser`;
+
+export const readSeal = (request: Request) => readCookie(request, cookieName());
+export const readBrowserSeal = (request: Request) => readCookie(request, browserCookieName());
+
+function readCookie(request: Request, name: string): string | undefined {
+  const start = `${name}=`;
   const cookies = request.headers.get("cookie")?.split(";").map((cookie) => cookie.trim()) ?? [];
   return cookies.find((cookie) => cookie.startsWith(start))?.slice(start.length);
 }
 
 export function setCookie(seal: string, keep: boolean): string {
-  return cookie(seal, keep ? `; Max-Age=${KEPT_DAYS * 86_400}` : "");
+  return cookie(cookieName(), seal, keep ? KEPT_DAYS : undefined);
 }
 
-export const clearCookie = () => cookie("", "; Max-Age=0");
+export const setBrowserCookie = (seal: string) => cookie(browserCookieName(), seal, BROWSER_DAYS);
 
-function cookie(value: string, more: string): string {
+export const clearCookie = () => cookie(cookieName(), "", 0);
+
+/** Without days it goes with the browser's window; with none it goes at once. */
+function cookie(name: string, value: string, days?: number): string {
   const secure = env().trustworthy ? "; Secure" : "";
-  return `${cookieName()}=${value}; Path=/; HttpOnly; SameSite=Lax${secure}${more}`;
+  const kept = days === undefined ? "" : `; Max-Age=${days * 86_400}`;
+  return `${name}=${value}; Path=/; HttpOnly; SameSite=Lax${secure}${kept}`;
 }

@@ -11,6 +11,10 @@ const environment = z.object({
   STILLYARD_ORIGIN: z.url(),
   STILLYARD_PEPPER: secret,
   STILLYARD_SESSION_KEYS: z.string().transform((text) => text.split(",")).pipe(z.array(secret).min(1)),
+  STILLYARD_SMTP: z.string().regex(/^smtps?:\/\//, "must be an smtp:// or smtps:// address").optional(),
+  STILLYARD_MAIL_FROM: z.string().regex(/^[^\r\n]*@[^\r\n]*$/, "must hold an e-mail address").optional(),
+  STILLYARD_REQUESTS_A_MINUTE: z.coerce.number().int().min(1).default(300),
+  STILLYARD_WRITES_IN_10_S: z.coerce.number().int().min(1).default(20),
 });
 
 export interface Env {
@@ -20,6 +24,12 @@ export interface Env {
   sessionKeys: string[];
   /** Whether browsers hold the address for secure: https, or this very machine. */
   trustworthy: boolean;
+  /** The server that takes our mail, and who it is from; without a server mail waits. */
+  smtp: string | undefined;
+  mailFrom: string;
+  /** How much one session may ask. */
+  requestsAMinute: number;
+  writesIn10s: number;
 }
 
 let checked: Env | undefined;
@@ -41,5 +51,9 @@ function readEnvironment(): Env {
     pepper: Buffer.from(read.data.STILLYARD_PEPPER, "base64url"),
     sessionKeys: read.data.STILLYARD_SESSION_KEYS,
     trustworthy: origin.protocol === "https:" || /^(localhost|127(\.\d+){3}|\[::1\])$/.test(origin.hostname),
+    smtp: read.data.STILLYARD_SMTP,
+    mailFrom: read.data.STILLYARD_MAIL_FROM ?? `Stillyard <post@${origin.hostname}>`,
+    requestsAMinute: read.data.STILLYARD_REQUESTS_A_MINUTE,
+    writesIn10s: read.data.STILLYARD_WRITES_IN_10_S,
   };
 }

@@ -8,6 +8,8 @@ const statuses = {
   unreadable: 400,
   "signed out": 401,
   refused: 403,
+  reauthenticate: 403,
+  unchecked: 403,
   missing: 404,
   conflict: 409,
   "too large": 413,
@@ -107,5 +109,5 @@ function databaseRefusal(thrown: unknown): Refusal | undefined {
 
 function isConnectionFault(thrown: unknown): boolean {
   if (!(thrown instanceof Error)) return false;
-  return /^Sequelize(Connection|HostNot)/.test(thrown.name) || /Connection terminated|connection timeout|query read timeout/i.test(thrown.message);
+  return /^Sequelize(Connection|HostNot)/.test(thrown.name) || /Connection terminated|connection timeout|query read timeout|not queryable|Client was closed|connection manager was closed/i.test(thrown.message);
 }

@@ -1,10 +1,10 @@
 import "server-only";
 import { createHash, randomBytes } from "node:crypto";
-import { fn, Op } from "sequelize";
+import { fn, Op, type Transaction } from "sequelize";
 import { Membership, Session, User } from "@/models";
 import { sealId, unsealId } from "./cookies";
-import { isAlive, isToMark, isToRenew } from "./lifetimes";
-import { hashPassword, isCheaper, matchesPassword } from "./passwords";
+import { isAlive, isProved, isToMark, isToRenew } from "./lifetimes";
+import { databaseNow } from "./moments";
 import { inTransaction } from "./transactions";
 
 /** Who asks. */
@@ -15,7 +15,8 @@ export interface Reader {
   theme: "light" | "dark" | "system";
   /** How the reader wants figures shown. */
   figures: { units: "metric" | "us"; mark: "point" | "comma" };
-  session: { idHash: string; keep: boolean; toRenew: boolean };
+  /** `proved`: the password was given a moment ago. `handle`: its name on the list of devices. */
+  session: { idHash: string; handle: string; keep: boolean; toRenew: boolean; proved: boolean };
 }
 
 const LIVE_SESSIONS = 10;
@@ -31,7 +32,7 @@ export async function identify(seal: string | undefined): Promise<Reader | undef
   const { user } = session;
   const now = session.get("now") as unknown as Date; // asked for beside the columns
   if (!isAlive(session, user.memberships.length > 0, now)) return undefined;
-  const { idHash, keep } = session;
+  const { idHash, handle, keep } = session;
   if (isToMark(session, now)) await Session.update({ seenAt: fn("now") }, { where: { idHash }, fields: ["seenAt"] });
   return {
     id: user.id,
@@ -39,7 +40,7 @@ export async function identify(seal: string | undefined): Promise<Reader | undef
     email: user.email,
     theme: user.theme,
     figures: { units: user.units, mark: user.decimalMark },
-    session: { idHash, keep, toRenew: isToRenew(session, now) },
+    session: { idHash, handle, keep, toRenew: isToRenew(session, now), proved: isProved(session, now) },
   };
 }
 
@@ -54,54 +55,39 @@ async function findSession(idHash: string) {
   return session as (Session & { now: Date; user: User & { memberships: Membership[] } }) | null;
 }
 
-export interface Credentials {
-  email: string;
-  password: string;
+interface Opening {
+  userId: string;
   keep: boolean;
   device: string;
 }
 
-/** A sealed id of a new session, or undefined where address and password do not fit. Both take the same work. */
-export async function signIn({ email, password, keep, device }: Credentials, oldSeal?: string): Promise<string | undefined> {
-  const user = await User.findOne({ where: { email: email.trim().toLowerCase() } });
-  const fits = await matchesPassword(password, user?.passwordHash);
-  if (!fits || !user) return undefined;
-  if (isCheaper(user.passwordHash)) await user.update({ passwordHash: await hashPassword(password) }, { fields: ["passwordHash"] });
-  await signOut(oldSeal);
+/** The sealed id of a new session. Of an account that has too many go ids that were replaced, then the oldest. */
+export async function openSession({ userId, keep, device }: Opening, transaction: Transaction): Promise<string> {
   const id = freshId();
-  await openSession({ idHash: hashOf(id), userId: user.id, keep, device: device.slice(0, 200) });
+  const idHash = hashOf(id);
+  // The account's row is held, so that two sign-ins count one after the other.
+  await User.findOne({ where: { id: userId }, lock: transaction.LOCK.UPDATE, transaction });
+  const fields: ("idHash" | "userId" | "keep" | "device")[] = ["idHash", "userId", "keep", "device"];
+  await Session.create({ idHash, userId, keep, device: device.slice(0, 200) }, { fields, transaction });
+  const live = await Session.findAll({ where: { userId }, order: [["replacedAt", "ASC NULLS FIRST"], ["seenAt", "DESC"]], transaction });
+  const newest = [...live.filter((one) => one.idHash === idHash), ...live.filter((one) => one.idHash !== idHash)];
+  const gone = newest.slice(LIVE_SESSIONS).map((one) => one.idHash);
+  if (gone.length) await Session.destroy({ where: { idHash: { [Op.in]: gone } }, transaction });
   return sealId(id);
-}
-
-/** The newest sessions stay; of an account that has too many go ids that were replaced, then the oldest. */
-async function openSession({ idHash, userId, keep, device }: { idHash: string; userId: string; keep: boolean; device: string }) {
-  await inTransaction(async (transaction) => {
-    // The account's row is held, so that two sign-ins count one after the other.
-    await User.findOne({ where: { id: userId }, lock: transaction.LOCK.UPDATE, transaction });
-    const fields: ("idHash" | "userId" | "keep" | "device")[] = ["idHash", "userId", "keep", "device"];
-    await Session.create({ idHash, userId, keep, device }, { fields, transaction });
-    const live = await Session.findAll({ where: { userId }, order: [["replacedAt", "ASC NULLS FIRST"], ["seenAt", "DESC"]], transaction });
-    const newest = [...live.filter((one) => one.idHash === idHash), ...live.filter((one) => one.idHash !== idHash)];
-    const gone = newest.slice(LIVE_SESSIONS).map((one) => one.idHash);
-    if (gone.length) await Session.destroy({ where: { idHash: { [Op.in]: gone } }, transaction });
-  });
 }
 
 /** Ends the session behind a cookie, at once and for every copy of it, also under the id it had or got a moment ago. */
 export async function signOut(seal: string | undefined): Promise<void> {
   const id = await unsealId(seal);
   const session = id && (await Session.findOne({ where: { idHash: hashOf(id) } }));
-  if (!session) return;
-  const { idHash, userId, issuedAt, replacedAt } = session;
-  const same = [{ idHash }, { replacedAt: within(issuedAt) }, ...(replacedAt ? [{ issuedAt: within(replacedAt) }] : [])];
-  await Session.destroy({ where: { userId, [Op.or]: same } });
+  if (session) await Session.destroy({ where: { userId: session.userId, handle: session.handle } });
 }
 
-/** A change of id writes one moment into both rows. The database's moments are finer than ours. */
-const within = (moment: Date) => ({ [Op.gte]: moment, [Op.lt]: new Date(moment.getTime() + 1) });
-
-/** A new id for a session that has had its own for a day. The old one holds a minute more; of two askers one renews. */
-export async function renewSession({ session }: Reader): Promise<string | undefined> {
+/**
+ * A new id for a session: each day, and when its password was given again. The old one holds a minute more, without that
+ * proof; of two askers one renews.
+ */
+export async function renewSession({ session }: Reader, { proved = false } = {}): Promise<string | undefined> {
   const id = freshId();
   const renewed = await inTransaction(async (transaction) => {
     const { idHash } = session;
@@ -109,10 +95,10 @@ export async function renewSession({ session }: Reader): Promise<string | undefi
     if (!old) return false;
     // Ids replaced before this one was given have long had their minute.
     await Session.destroy({ where: { userId: old.userId, replacedAt: { [Op.lt]: old.issuedAt } }, transaction });
-    await old.update({ replacedAt: fn("now") as unknown as Date }, { fields: ["replacedAt"], transaction }); // the database's time
-    const { userId, keep, device, beganAt } = old;
-    const fields: ("idHash" | "userId" | "keep" | "device" | "beganAt")[] = ["idHash", "userId", "keep", "device", "beganAt"];
-    await Session.create({ idHash: hashOf(id), userId, keep, device, beganAt }, { fields, transaction });
+    await old.update({ replacedAt: databaseNow() }, { fields: ["replacedAt"], transaction });
+    const { userId, keep, device, handle, beganAt } = old;
+    const row = { idHash: hashOf(id), userId, keep, device, handle, beganAt, provedAt: proved ? databaseNow() : old.provedAt };
+    await Session.create(row, { fields: ["idHash", "userId", "keep", "device", "handle", "beganAt", "provedAt"], transaction });
     return true;
   });
   return renewed ? sealId(id) : undefined;

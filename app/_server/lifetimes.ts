@@ -8,6 +8,8 @@ const DAY = 24 * HOUR;
 const GRACE = MINUTE;
 const RENEWED_AFTER = DAY;
 const SEEN_EVERY = MINUTE;
+/** How long a password that was given again counts for what asks for it. */
+const PROOF = 10 * MINUTE;
 
 export interface Times {
   beganAt: Date;
@@ -34,3 +36,7 @@ export const isToRenew = ({ issuedAt, replacedAt }: Times, now: Date) =>
   replacedAt === null && now.getTime() - issuedAt.getTime() > RENEWED_AFTER;
 
 export const isToMark = ({ seenAt }: Times, now: Date) => now.getTime() - seenAt.getTime() > SEEN_EVERY;
+
+/** A replaced id proves nothing: what was given, was given under the new one. */
+export const isProved = ({ provedAt, replacedAt }: Times & { provedAt: Date }, now: Date) =>
+  replacedAt === null && now.getTime() - provedAt.getTime() <= PROOF;

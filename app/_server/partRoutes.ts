@@ -3,6 +3,7 @@ import { z } from "zod";
 import type { PartKind } from "@/lib/noise/plan";
 import { adoptConstruction } from "@/models/adoptConstruction";
 import { filledIn } from "@/models/filledIn";
+import { withOwnPower } from "@/models/ownPower";
 import { addPart, changePart, partKindOf, removePart, type Act, type Place } from "@/models/parts";
 import type { ActName } from "./access";
 import { notFound } from "./errors";
@@ -38,9 +39,13 @@ export async function addOne(place: Place, params: PartParams, body: Values): Pr
   return [...added, ...(await changeOne(place, { ...params, partId: added[0]!.id }, { construction }))];
 }
 
-/** Changes one part. An element may name a construction of the catalogue: its record is copied into the project first. */
+/**
+ * Changes one part. An element may name a construction of the catalogue: its record is copied into the project first. Of a
+ * source levels may be given that were measured beside it (`measured`): what is stored is the power behind them.
+ */
 export async function changeOne(place: Place, params: OnePartParams, body: Values): Promise<Act[]> {
   const kind = kindOf(params);
+  if (kind === "source" && body.measured !== undefined) return changePart(place, kind, params.partId, await withOwnPower(place, params.partId, body));
   const { construction, ...patch } = body;
   if (kind !== "element" || construction === undefined) return changePart(place, kind, params.partId, filledIn(kind, body));
   const { catalogueKey } = read(choice, construction);

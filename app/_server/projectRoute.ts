@@ -2,15 +2,16 @@ import "server-only";
 import { fn, type Transaction } from "sequelize";
 import { countPairs, MOST_PAIRS } from "@/lib/noise/sound/pairs";
 import { Project, Revision, User, type Act } from "@/models";
-import { advancePlan, readPlan } from "@/models/parts";
+import { advancePlan, readPlan, type StoredPlan } from "@/models/parts";
 import type { ActName } from "./access";
 import { answer, jsonAnswer, renewed, requireReader } from "./answer";
 import { Refusal } from "./errors";
+import { once } from "./idempotency";
 import type { Reader } from "./identity";
 import { openProject, prepareAnswer, type Opened } from "./projects";
 import { readBody, readRevision, requireSameOrigin } from "./request";
 import { inOneMoment, inTransaction } from "./transactions";
-import { keptPlan, weigh } from "./weigh";
+import { keptAnswer, keptPlan, weigh, type Answer } from "./weigh";
 
 type Ids = { projectId: string };
 type Route<P> = (request: Request, context: { params: Promise<P> }) => Promise<Response>;
@@ -57,14 +58,15 @@ export function projectRoute<P extends Ids>(act: ActOf<P>, change: (given: Chang
       const reader = await requireReader(request);
       const params = await context.params;
       const body = request.method === "DELETE" ? {} : await readBody(request);
-      const made = { reader, params, act: actOf(act, params), made: readRevision(request) };
+      const made = { request, reader, params, body, act: actOf(act, params), made: readRevision(request) };
       try {
-        const { project, stored } = await inTransaction((transaction) =>
+        const { project, revision, stored } = await inTransaction((transaction) =>
           changed({ ...made, transaction }, (project) =>
             change({ params, projectId: params.projectId, project, body, transaction }),
           ),
         );
-        return await renewed(jsonAnswer(weigh(project.id, project.revision, stored)), reader);
+        const answered = stored ? weigh(project.id, revision, stored) : await answerAgain(project, revision);
+        return await renewed(jsonAnswer(answered), reader);
       } catch (thrown) {
         if (thrown instanceof Stale) return await staleAnswer(thrown);
         throw thrown;
@@ -73,28 +75,53 @@ export function projectRoute<P extends Ids>(act: ActOf<P>, change: (given: Chang
 }
 
 interface Making {
+  request: Request;
   reader: Reader;
   params: Ids;
+  body: Record<string, unknown>;
   act: ActName;
   made: number | undefined;
   transaction: Transaction;
 }
 
-async function changed({ reader, params, act, made, transaction }: Making, change: (project: Project) => Promise<Act[]>) {
-  const { projectId } = params;
-  const { project, role } = await openProject({ reader, projectId, act, transaction });
+/** The revision a request came to, and the plan as it then stands unless the request is one that was done before. */
+async function changed(making: Making, change: (project: Project) => Promise<Act[]>) {
+  const { reader, params, act, transaction } = making;
+  const { project, role } = await openProject({ reader, projectId: params.projectId, act, transaction });
+  let stored: StoredPlan | undefined;
+  // Before the revision is looked at: a request that was done and comes again is late by its own doing.
+  const { revision } = await once(making, async () => {
+    stored = await changeNow(making, { project, role }, change);
+    return { revision: project.revision };
+  });
+  return { project, revision, stored };
+}
+
+async function changeNow({ reader, made, transaction }: Making, { project, role }: Pick<Opened, "project" | "role">, change: (project: Project) => Promise<Act[]>): Promise<StoredPlan> {
+  const { id } = project;
   if (made === undefined) throw new Refusal("revision needed", "Say which revision this change was made on (If-Match).");
   // Who is late is told before anybody waits for the lock.
-  if (project.revision !== made) throw new Stale(projectId, made);
+  if (project.revision !== made) throw new Stale(id, made);
   await project.reload({ lock: transaction.LOCK.UPDATE, transaction });
-  if (project.revision !== made) throw new Stale(projectId, made);
+  if (project.revision !== made) throw new Stale(id, made);
   const acts = await change(project);
-  const plan = keptPlan(projectId, made);
+  const plan = keptPlan(id, made);
   if (acts.length) await record({ project, acts, reader, role, transaction });
   // Under the lock the plan of the revision before is the rows as they stood: no need to read them all again.
-  const stored = plan ? { plan: advancePlan(plan, acts), damage: [] } : await readPlan(projectId, transaction);
+  const stored = plan ? { plan: advancePlan(plan, acts), damage: [] } : await readPlan(id, transaction);
   if (acts.some(({ act }) => act !== "remove")) refuseTooMany(countPairs(stored.plan));
-  return { project, stored };
+  return stored;
+}
+
+/** What a request that was done before was answered; where memory no longer holds that, the yard as it stands now. */
+async function answerAgain({ id }: Project, revision: number): Promise<Answer> {
+  const kept = keptAnswer(id, revision);
+  if (kept) return kept;
+  const finish = await inOneMoment(async (transaction) => {
+    const project = await Project.findOne({ where: { id }, rejectOnEmpty: true, transaction });
+    return prepareAnswer(project, transaction);
+  });
+  return finish();
 }
 
 /** The bound on the work of one verdict. What only takes away is never refused. */

@@ -70,14 +70,21 @@ const withUser = [{ model: User, as: "user", attributes: ["name"], required: tru
 type Named = { user: { name: string } };
 
 /** Who is at work on a project: names and roles, never addresses. */
-export async function peopleOf({ id, teamId }: Project, reader: Reader, transaction: Transaction): Promise<Person[]> {
-  const members = await Membership.findAll({ where: { teamId }, include: withUser, transaction });
-  const invited = await Participation.findAll({ where: { projectId: id }, include: withUser, transaction });
-  const order: Role[] = ["owner", "acoustician", "client", "builder"];
-  return [...members, ...invited]
-    .map((row) => ({ name: (row as typeof row & Named).user.name, role: row.role as Role, you: row.userId === reader.id }))
-    .sort((one, other) => order.indexOf(one.role) - order.indexOf(other.role) || one.name.localeCompare(other.name));
+export async function peopleOf(project: Project, reader: Reader, transaction: Transaction): Promise<Person[]> {
+  return (await peopleOfEach([project], reader, transaction))(project);
 }
+
+/** The same for several projects, asked for at once. */
+export async function peopleOfEach(projects: readonly Project[], reader: Reader, transaction: Transaction): Promise<(project: Project) => Person[]> {
+  const members = await Membership.findAll({ where: { teamId: projects.map(({ teamId }) => teamId) }, include: withUser, transaction });
+  const invited = await Participation.findAll({ where: { projectId: projects.map(({ id }) => id) }, include: withUser, transaction });
+  return ({ id, teamId }) =>
+    [...members.filter((one) => one.teamId === teamId), ...invited.filter((one) => one.projectId === id)]
+      .map((row) => ({ name: (row as typeof row & Named).user.name, role: row.role as Role, you: row.userId === reader.id }))
+      .sort((one, other) => order.indexOf(one.role) - order.indexOf(other.role) || one.name.localeCompare(other.name));
+}
+
+const order: readonly Role[] = ["owner", "acoustician", "client", "builder"];
 
 /**
  * Gathers inside a transaction what an answer needs; the answer itself is made outside it. One that memory holds is held

@@ -2,9 +2,11 @@ import "server-only";
 import { z } from "zod";
 import { fieldWords } from "@/models/parts";
 import { answer, emptyAnswer, jsonAnswer } from "./answer";
-import { clearCookie, readSeal, setCookie } from "./cookies";
+import { signIn } from "./accounts/signIn";
+import { networkOf } from "./accounts/throttles";
+import { clearCookie, readBrowserSeal, readSeal, setBrowserCookie, setCookie } from "./cookies";
 import { Refusal } from "./errors";
-import { signIn, signOut } from "./identity";
+import { signOut } from "./identity";
 import { readBody, requireSameOrigin } from "./request";
 
 const form = z.strictObject({
@@ -20,9 +22,11 @@ export function signInRoute(request: Request): Promise<Response> {
     requireSameOrigin(request);
     const { keep, next, ...credentials } = read(form, await readBody(request));
     const device = request.headers.get("user-agent") ?? "";
-    const seal = await signIn({ ...credentials, keep, device }, readSeal(request));
-    if (!seal) throw new Refusal("signed out", "E-mail and password do not fit together.");
-    return jsonAnswer({ next: ownAddress(next) }, { "Set-Cookie": setCookie(seal, keep) });
+    const seals = { old: readSeal(request), browser: readBrowserSeal(request) };
+    const { seal, browserSeal } = await signIn({ ...credentials, keep, device, network: networkOf(request) }, seals);
+    const response = jsonAnswer({ next: ownAddress(next) }, { "Set-Cookie": setCookie(seal, keep) });
+    response.headers.append("Set-Cookie", setBrowserCookie(browserSeal));
+    return response;
   });
 }
 

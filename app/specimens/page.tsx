@@ -14,15 +14,18 @@ import { STACK_ORDER } from "@/components/marks/hatches";
 import { Icon } from "@/components/marks/Icon";
 import { MarginWords } from "@/components/marks/MarginWords";
 import { SmallBeam } from "@/components/marks/SmallBeam";
-import { EmptyYards, ProjectList } from "@/components/projects/ProjectList";
-import { ExampleCut } from "@/components/signIn/ExampleCut";
-import { SignInPage } from "@/components/signIn/SignInPage";
+import { EmptyYards } from "@/components/projects/EmptyYards";
+import { ProjectList } from "@/components/projects/ProjectList";
+import { readYardView } from "@/components/projects/yardView";
+import { EntrySheet } from "@/components/signIn/EntrySheet";
+import { SignInForm } from "@/components/signIn/SignInForm";
 import { Button, LinkButton } from "@/components/ui/Button";
 import { Disclosure } from "@/components/ui/Disclosure";
 import { Sheet } from "@/components/ui/Sheet";
 import { Strip } from "@/components/ui/Strip";
 import { Cell, HeadCell, Row, RowHead, Table } from "@/components/ui/Table";
 import { Tag } from "@/components/ui/Tag";
+import { exampleBuild } from "../exampleBuild";
 import { iconNames, margins, projects } from "./samples";
 import { ButtonTrials, DialogTrial, FieldTrials, WidthTrial } from "./Trials";
 
@@ -185,12 +188,18 @@ export default async function SpecimensPage() {
             ))}
           </div>
         </Sheet>
-        <SignInPage notice="This address is not encrypted. Use it only in your own network." />
-        <div className="on-slab rounded-sheet p-4">
-          <ExampleCut levels={[104, 74, 63, 59, 52]} />
-        </div>
-        <ProjectList projects={projects} now="2027-01-14T21:30:00Z" timeZone="Europe/Berlin" newYard={<Button look="ink" icon={<Icon name="plus" />}>New yard</Button>} />
-        <EmptyYards newYard={<Button look="ink">Draw the fence</Button>} />
+        <EntrySheet heading="Sign in" example={exampleBuild()}>
+          <SignInForm notice="This address is not encrypted. Use it only in your own network." />
+        </EntrySheet>
+        <ProjectList
+          projects={projects}
+          now="2027-01-14T21:30:00Z"
+          timeZone="Europe/Berlin"
+          view={readYardView(() => null)}
+          facts={{ page: 1, pages: 1, found: 4, inUse: 4, archived: 0, paged: false }}
+          mayMake
+        />
+        <EmptyYards actions={<Button look="ink">Draw the fence</Button>} />
       </Page>
       <PhoneBar stages={stages} />
     </>

@@ -4,10 +4,9 @@ import { useEffect, useSyncExternalStore } from "react";
 import { meRoute } from "../addresses";
 import { Icon } from "../marks/Icon";
 import { Button } from "../ui/Button";
-import { THEME_COOKIE, type Theme } from "./theme";
+import { applyTheme, THEME_CHANGED, THEME_COOKIE, type Theme } from "./theme";
 
 const SYSTEM_DARK = "(prefers-color-scheme: dark)";
-const CHANGED = "stillyard-theme-changed";
 
 const current = (): Theme => {
   const chosen = document.documentElement.dataset.theme;
@@ -18,18 +17,11 @@ const current = (): Theme => {
 function listen(changed: () => void) {
   const system = window.matchMedia(SYSTEM_DARK);
   system.addEventListener("change", changed);
-  window.addEventListener(CHANGED, changed);
+  window.addEventListener(THEME_CHANGED, changed);
   return () => {
     system.removeEventListener("change", changed);
-    window.removeEventListener(CHANGED, changed);
+    window.removeEventListener(THEME_CHANGED, changed);
   };
-}
-
-/** The cookie serves the next page on this device. */
-function apply(theme: Theme) {
-  document.documentElement.dataset.theme = theme;
-  document.cookie = `${THEME_COOKIE}=${theme}; path=/; max-age=31536000; samesite=lax`;
-  window.dispatchEvent(new Event(CHANGED));
 }
 
 const isChosenHere = (): boolean => document.cookie.split("; ").some((cookie) => cookie.startsWith(`${THEME_COOKIE}=`));
@@ -49,12 +41,12 @@ export function ThemeSwitch({ theme, signedIn = false }: { theme?: Theme; signed
   const dark = shown === "dark";
   // A device that nothing was chosen on takes the choice of the account; after that it keeps its own.
   useEffect(() => {
-    if (theme && !isChosenHere()) apply(theme);
+    if (theme && !isChosenHere()) applyTheme(theme);
   }, [theme]);
 
   function turn() {
     const other = dark ? "light" : "dark";
-    apply(other);
+    applyTheme(other);
     if (signedIn) storeTheme(other);
   }
 

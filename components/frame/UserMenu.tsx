@@ -1,8 +1,8 @@
 "use client";
 
 import { useEffect, useRef, useState } from "react";
-import { sessionRoute, signInAddress } from "../addresses";
-import { Button } from "../ui/Button";
+import { accountAddress, sessionRoute, signInAddress } from "../addresses";
+import { Button, LinkButton } from "../ui/Button";
 
 export interface Person {
   name: string;
@@ -70,8 +70,11 @@ export function UserMenu({ user }: { user: Person }) {
         <span aria-hidden="true">{initialsOf(user.name)}</span>
       </summary>
       <div className="absolute right-0 top-12 z-30 w-[min(18rem,calc(100vw-24px))] rounded-sheet border border-edge bg-sheet p-4">
-        <p className="font-semibold">{user.name}</p>
-        <p className="mb-3 text-second text-ink2">{user.email}</p>
+        <p className="font-semibold break-words">{user.name}</p>
+        <p className="mb-3 text-second break-words text-ink2">{user.email}</p>
+        <LinkButton className="mb-2 w-full" href={accountAddress}>
+          Your account
+        </LinkButton>
         <Button className="w-full" onClick={leave} aria-disabled={busy || undefined}>
           Sign out
         </Button>

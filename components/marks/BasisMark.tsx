@@ -17,10 +17,12 @@ interface Props {
   basis: BasisWord;
   /** One standard deviation, dB: the bar is as wide as the doubt to both sides. */
   doubt?: number;
+  /** Instead of the basis' own word: "your figure". */
+  word?: string;
 }
 
 /** What a figure rests on: a bead on a bar as wide as the doubt, always with its word. */
-export function BasisMark({ basis, doubt }: Props) {
+export function BasisMark({ basis, doubt, word = basisWords[basis] }: Props) {
   const half = doubt === undefined ? 14 : Math.max(LEAST, Math.min(12, doubt) * PIXELS_PER_DECIBEL);
   const middle = half + 1;
   const width = 2 * middle;
@@ -43,7 +45,7 @@ export function BasisMark({ basis, doubt }: Props) {
         {beads[basis](middle)}
       </svg>
       <span>
-        {basisWords[basis]}
+        {word}
         {doubt !== undefined && `, give or take ${formatNumber(doubt, doubt < 2 ? 1 : 0)}\u00a0dB`}
       </span>
     </span>

@@ -15,7 +15,10 @@ interface Props {
 /** A save that did not arrive. What was typed stays where it stands; the words come into sight from any field. */
 export function SaveTrouble(props: Props) {
   const place = useRef<HTMLDivElement>(null);
-  useEffect(() => place.current?.scrollIntoView?.({ block: "nearest" }), [props.trouble]);
+  useEffect(() => {
+    // Some browsers answer with a promise, which is no clean-up.
+    void place.current?.scrollIntoView?.({ block: "nearest" });
+  }, [props.trouble]);
   return (
     <div ref={place} className="scroll-mt-28">
       <TroubleStrip {...props} />

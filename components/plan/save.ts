@@ -82,28 +82,53 @@ interface Request {
 
 /** Sends a change; when somebody else was quicker and touched nothing this change touches, sends it once more. */
 async function write(request: Request, revision: number, collides: (touched: ReadonlySet<string>) => boolean): Promise<Saved> {
-  const first = await send(request, revision);
+  const key = keyOf(request);
+  const first = await send(request, revision, key);
   if (first.kind !== "stale") return first;
   const { whole, parts } = first.changedBy;
   const touched = new Set(parts.map(({ id }) => id));
-  return !whole || collides(touched) ? first : send(request, first.current.revision);
+  return !whole || collides(touched) ? first : send(request, first.current.revision, key);
+}
+
+/**
+ * Keys of acts that had no answer. The same act asked again bears the same key, so that it is done once even if only its
+ * answer was lost. Once the server has answered anything, the screen shows what is so, and the same act is a new wish.
+ */
+const unanswered = new Map<string, string>();
+
+function keyOf({ method, address, body }: Request): string {
+  const act = JSON.stringify([method, address, body]);
+  const key = unanswered.get(act) ?? freshKey();
+  unanswered.set(act, key);
+  return key;
+}
+
+/** 128 bits of chance; `crypto.randomUUID` is there on secure addresses only. */
+export function freshKey(): string {
+  const bytes = crypto.getRandomValues(new Uint8Array(16));
+  return Array.from(bytes, (byte) => byte.toString(16).padStart(2, "0")).join("");
 }
 
 const SECONDS = 30;
 
-async function send({ method, address, body }: Request, revision: number): Promise<Saved> {
+async function send({ method, address, body }: Request, revision: number, key: string): Promise<Saved> {
   try {
     const response = await fetch(address, {
       method,
-      headers: { "If-Match": `"${revision}"`, ...(body && { "Content-Type": "application/json" }) },
+      headers: { "If-Match": `"${revision}"`, "Idempotency-Key": key, ...(body && { "Content-Type": "application/json" }) },
       body: body && JSON.stringify(body),
       signal: AbortSignal.timeout(SECONDS * 1000),
     });
-    return await savedOf(response);
+    const saved = await savedOf(response);
+    if (isSettled(response.status)) unanswered.clear();
+    return saved;
   } catch {
     return { kind: "failed", message: "No answer from the server. What you typed is kept here; try again." };
   }
 }
+
+/** Whether an answer tells what became of the act: a fault, a lock or a wait does not. */
+const isSettled = (status: number) => status < 500 && status !== 409 && status !== 429;
 
 /** The error part of an answer, as the routes write it. */
 interface ErrorAnswer {

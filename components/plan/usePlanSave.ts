@@ -27,6 +27,7 @@ export function usePlanSave(projectId: string) {
   const [saving, setSaving] = useAtom(savingAtom);
   const store = useStore();
   const queue = useRef<Promise<unknown>>(Promise.resolve());
+  const lately = useRef<Twins>(undefined);
   const [before, setBefore] = useState<Answer>();
   const [refusals, setRefusals] = useState<Record<string, Refusal>>({});
   const [trouble, setTrouble] = useState<Trouble & { changes: Changes; spot: string }>();
@@ -57,8 +58,11 @@ export function usePlanSave(projectId: string) {
   /** Each save starts from the answer of the one before: quick steps in a field must not overtake each other. */
   function save(changes: PlanChange | Changes, spot = "", from?: Answer): Promise<Saved> {
     const list = Array.isArray(changes) ? (changes as Changes) : [changes as PlanChange];
+    const act = JSON.stringify([list, spot]);
+    if (isTwin(lately.current, act)) return lately.current.sent;
     const sent = queue.current.then(() => send(list, spot, from ?? store.get(answerAtom)));
     queue.current = sent;
+    lately.current = list.some((change) => change.act === "add") ? foldTwins(act, sent) : undefined;
     return sent;
   }
 
@@ -84,6 +88,30 @@ export function usePlanSave(projectId: string) {
     keepMine: () => conflict && save(conflict.changes, conflict.spot, conflict.current),
     retry: () => trouble && save(trouble.changes, trouble.spot),
   };
+}
+
+/** An addition on its way or just made: the same wish again is a double click, not a second one. */
+interface Twins {
+  act: string;
+  sent: Promise<Saved>;
+  /** Milliseconds of `performance.now()`. */
+  until: number;
+}
+
+const DOUBLE_CLICK = 1_000;
+
+/** Each click of a row of them holds the door shut a while longer. */
+function isTwin(twins: Twins | undefined, act: string): twins is Twins {
+  const now = performance.now();
+  if (twins?.act !== act || now >= twins.until) return false;
+  twins.until = Math.max(twins.until, now + DOUBLE_CLICK);
+  return true;
+}
+
+function foldTwins(act: string, sent: Promise<Saved>): Twins {
+  const twins = { act, sent, until: Infinity };
+  void sent.then(({ kind }) => (twins.until = kind === "saved" ? performance.now() + DOUBLE_CLICK : 0));
+  return twins;
 }
 
 export type PlanSave = ReturnType<typeof usePlanSave>;

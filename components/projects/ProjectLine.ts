@@ -12,8 +12,15 @@ export interface DrawnBuilding {
 export interface ProjectLine {
   id: string;
   href: string;
+  /** Of the stage where it is drawn. */
+  yardHref: string;
+  revision: number;
   name: string;
   says: string;
+  /** ISO 8601. */
+  changedAt: string;
+  archived: boolean;
+  may: { rename: boolean; copy: boolean };
   lot: readonly Point[];
   buildings: readonly DrawnBuilding[];
   /** The worst listener. */

@@ -1,12 +1,17 @@
 "use client";
 
+import Link from "next/link";
 import { useRef, useState, type FormEvent } from "react";
-import { sessionRoute } from "../addresses";
+import { forgottenAddress, sessionRoute } from "../addresses";
+import { capitalise } from "../format";
 import { Button } from "../ui/Button";
 import { Checkbox } from "../ui/Checkbox";
 import { Strip } from "../ui/Strip";
-import { TextField } from "../ui/TextField";
+import { EmailField } from "./EmailField";
+import { PasswordField } from "./PasswordField";
 import { signIn, type SignInOutcome } from "./signIn";
+import { useWait } from "./useWait";
+import { waitReason, WaitRule } from "./WaitRule";
 
 interface Props {
   /** Where to go after it, when a page asked for the sign-in. */
@@ -22,14 +27,20 @@ function emptyField(email: string, password: string): "email" | "password" | und
   return password === "" ? "password" : undefined;
 }
 
+function OutcomeStrip({ outcome }: { outcome: SignInOutcome | undefined }) {
+  if (outcome?.kind === "fault") return <Strip kind="error" heading="Cannot sign in just now">{outcome.message}</Strip>;
+  if (outcome?.kind === "unchecked") return <Strip kind="mail" heading="Look in your mail first">{capitalise(outcome.message.replace(/^Look in your mail first: ?/, ""))}</Strip>;
+  return null;
+}
+
 export function SignInForm({ next, notice, onSignedIn = (path) => window.location.assign(path) }: Props) {
   const [email, setEmail] = useState("");
   const [password, setPassword] = useState("");
   const [keep, setKeep] = useState(false);
-  const [shown, setShown] = useState(false);
   const [busy, setBusy] = useState(false);
   const [missing, setMissing] = useState<"email" | "password">();
   const [outcome, setOutcome] = useState<SignInOutcome>();
+  const [wait, beginWait, forgetWait] = useWait();
   const emailField = useRef<HTMLInputElement>(null);
   const passwordField = useRef<HTMLInputElement>(null);
 
@@ -37,6 +48,7 @@ export function SignInForm({ next, notice, onSignedIn = (path) => window.locatio
     if (result.kind === "in") return onSignedIn(result.next);
     setBusy(false);
     setOutcome(result);
+    if (result.kind === "wait") beginWait(result.seconds, result.message);
     if (result.kind !== "refused") return;
     setPassword("");
     passwordField.current?.focus();
@@ -44,10 +56,11 @@ export function SignInForm({ next, notice, onSignedIn = (path) => window.locatio
 
   async function submit(event: FormEvent) {
     event.preventDefault();
-    if (busy) return;
+    if (busy || wait.left > 0) return;
     const empty = emptyField(email, password);
     setMissing(empty);
     setOutcome(undefined);
+    forgetWait();
     if (empty) return (empty === "email" ? emailField : passwordField).current?.focus();
     setBusy(true);
     receive(await signIn({ email: email.trim(), password, keep, next }));
@@ -58,34 +71,15 @@ export function SignInForm({ next, notice, onSignedIn = (path) => window.locatio
     // Without script the browser posts the fields, so that no password ever stands in an address.
     <form method="post" action={sessionRoute} noValidate onSubmit={submit} className="flex flex-col gap-4">
       {notice && <Strip kind="note" heading={notice} />}
-      <TextField
-        ref={emailField}
-        label="E-mail"
-        name="email"
-        type="email"
-        autoComplete="username"
-        inputMode="email"
-        spellCheck={false}
-        value={email}
-        onChange={(event) => setEmail(event.target.value)}
-        error={missing === "email" ? "Type the e-mail you are known by." : undefined}
-      />
-      <TextField
+      <EmailField ref={emailField} value={email} onType={setEmail} error={missing === "email" ? "Type the e-mail you are known by." : undefined} />
+      <PasswordField
         ref={passwordField}
         label="Password"
         name="password"
-        type={shown ? "text" : "password"}
         autoComplete="current-password"
-        spellCheck={false}
-        autoCapitalize="none"
         value={password}
-        onChange={(event) => setPassword(event.target.value)}
+        onType={setPassword}
         error={missing === "password" ? "Type your password." : refusal}
-        beside={
-          <Button className="flex-none" aria-label={shown ? "Hide the password" : "Show the password"} onClick={() => setShown(!shown)}>
-            {shown ? "Hide" : "Show"}
-          </Button>
-        }
       />
       <Checkbox
         name="keep"
@@ -94,11 +88,19 @@ export function SignInForm({ next, notice, onSignedIn = (path) => window.locatio
         checked={keep}
         onChange={(event) => setKeep(event.target.checked)}
       />
-      {outcome?.kind === "wait" && <Strip kind="wait" heading="Wait a little">{outcome.message}</Strip>}
-      {outcome?.kind === "fault" && <Strip kind="error" heading="Cannot sign in just now">{outcome.message}</Strip>}
-      <Button type="submit" look="ink" className="w-full" aria-disabled={busy || undefined}>
-        {busy ? "Signing in" : "Sign in"}
-      </Button>
+      <WaitRule wait={wait}>
+        A browser you signed in with before is not held back by the tries of others. If it was not you who tried,{" "}
+        <Link href={forgottenAddress} className="underline">
+          get a link and set a new password
+        </Link>
+        .
+      </WaitRule>
+      <OutcomeStrip outcome={outcome} />
+      <div>
+        <Button type="submit" look="ink" className="min-h-12 w-full" aria-disabled={busy || undefined} reason={waitReason(wait)}>
+          {busy ? "Signing in" : "Sign in"}
+        </Button>
+      </div>
     </form>
   );
 }

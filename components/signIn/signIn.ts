@@ -1,4 +1,5 @@
 import { ownAddress, sessionRoute } from "../addresses";
+import { ask } from "./ask";
 
 export interface Credentials {
   email: string;
@@ -11,33 +12,30 @@ export type SignInOutcome =
   | { kind: "in"; next: string }
   /** E-mail and password do not belong together, or one of them cannot be read. */
   | { kind: "refused"; message: string }
-  | { kind: "wait"; message: string }
+  /** They belong together, but nobody has opened the link in the mail yet. */
+  | { kind: "unchecked"; message: string }
+  | { kind: "wait"; message: string; seconds: number }
   | { kind: "fault"; message: string };
 
 const UNREACHABLE = "Your e-mail and password are still in the fields. Try again in a few seconds.";
-
-async function readAnswer(answer: Response): Promise<{ next?: unknown; message?: unknown }> {
-  const body: { next?: unknown; error?: { message?: unknown } } | null = await answer.json().catch(() => null);
-  return { next: body?.next, message: body?.error?.message };
-}
-
-const words = (message: unknown, otherwise: string): string =>
-  typeof message === "string" && message !== "" ? message : otherwise;
+const MISFIT = "E-mail and password do not fit together. The e-mail is kept; type the password again.";
+const UNCHECKED = "A link went to this e-mail when you signed up. Open it and press the button there.";
 
 export async function signIn(credentials: Credentials): Promise<SignInOutcome> {
-  let answer: Response;
-  try {
-    answer = await fetch(sessionRoute, {
-      method: "POST",
-      headers: { "Content-Type": "application/json" },
-      body: JSON.stringify(credentials),
-    });
-  } catch {
-    return { kind: "fault", message: UNREACHABLE };
+  const answered = await ask("POST", sessionRoute, credentials);
+  switch (answered.kind) {
+    case "done": {
+      const next = answered.body?.next;
+      return { kind: "in", next: ownAddress(typeof next === "string" ? next : undefined) };
+    }
+    case "wait":
+      return answered;
+    case "fault":
+      return { kind: "fault", message: answered.message.includes("fields") ? UNREACHABLE : answered.message };
+    case "refused":
+      if (answered.code === "unchecked") return { kind: "unchecked", message: answered.message || UNCHECKED };
+      return { kind: "refused", message: answered.message || MISFIT };
+    case "invalid":
+      return { kind: "refused", message: answered.message || MISFIT };
   }
-  const { next, message } = await readAnswer(answer);
-  if (answer.ok) return { kind: "in", next: ownAddress(typeof next === "string" ? next : undefined) };
-  if (answer.status === 429) return { kind: "wait", message: words(message, "Too many tries. Wait a little, then try again.") };
-  if (answer.status >= 500) return { kind: "fault", message: words(message, UNREACHABLE) };
-  return { kind: "refused", message: words(message, "E-mail and password do not fit together. The e-mail is kept; type the password again.") };
 }

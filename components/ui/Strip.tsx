@@ -2,7 +2,7 @@ import clsx from "clsx";
 import type { ReactNode } from "react";
 import { Icon, type IconName } from "../marks/Icon";
 
-export type StripKind = "stale" | "error" | "offline" | "undo" | "note" | "wait" | "stop";
+export type StripKind = "stale" | "error" | "offline" | "undo" | "note" | "wait" | "stop" | "mail";
 
 const forms: Record<StripKind, { icon: IconName; border: string; iconColour: string }> = {
   stale: { icon: "note", border: "border-dashed border-edge", iconColour: "text-ink" },
@@ -11,6 +11,7 @@ const forms: Record<StripKind, { icon: IconName; border: string; iconColour: str
   undo: { icon: "undo", border: "border-edge", iconColour: "text-ink2" },
   note: { icon: "note", border: "border-ink", iconColour: "text-ink" },
   wait: { icon: "clock", border: "border-ink", iconColour: "text-ink" },
+  mail: { icon: "mail", border: "border-ink", iconColour: "text-ink" },
   stop: { icon: "hand", border: "border-ink", iconColour: "text-ink" },
 };
 

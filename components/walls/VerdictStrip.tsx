@@ -2,7 +2,7 @@
 
 import Link from "next/link";
 import { OCTAVE_BANDS } from "../../lib/noise/bands";
-import { elementAddress } from "../addresses";
+import { elementAddress, limitsAddress } from "../addresses";
 import { bandWords, formatNumber, percent, withUnit } from "../format";
 import { MarginWords } from "../marks/MarginWords";
 import { SmallBeam } from "../marks/SmallBeam";
@@ -38,7 +38,9 @@ export function VerdictStrip({ answer, before, weighing = false, projectId, budg
           {lead ? (
             <LeadWords lead={lead} answer={answer} before={before} weighing={weighing} />
           ) : (
-            <p>Add a listener to weigh it.</p>
+            <p>
+              <Link href={limitsAddress(projectId)}>Add a listener</Link> to weigh it.
+            </p>
           )}
         </div>
         {lead && !phone && (

@@ -1,23 +1,26 @@
 "use client";
 
 import { useAtomValue } from "jotai";
-import Link from "next/link";
 import { useMemo, useState } from "react";
 import type { ConstructionSheet } from "../../lib/noise/sheet";
-import { elementAddress, budgetAddress, signInAddress, wallsAddress } from "../addresses";
+import { elementAddress, budgetAddress, wallsAddress } from "../addresses";
 import { savingAtom } from "../state/plan";
 import { Sheet } from "../ui/Sheet";
 import { leadOf } from "./answer";
 import { Cautions } from "./Cautions";
 import { cautionsOf } from "./cautions";
-import { ConflictPanel } from "../plan/ConflictPanel";
 import { ConstructionChoice } from "./ConstructionChoice";
-import { choicesFor, findSheet, nameOfConstruction, type Library } from "./choices";
+import { choicesFor, findSheet, type Library } from "./choices";
 import { ElementFields, LockedReason } from "./ElementFields";
 import { sidesOf, wordsOf } from "./elementWords";
 import { LayersSheet } from "./LayersSheet";
-import { comparePatch, type ElementPatch } from "./patches";
-import { SaveTrouble } from "../plan/SaveTrouble";
+import { elementComparison } from "./comparison";
+import { DuctFields } from "./DuctFields";
+import { ElementPlace } from "./ElementPlace";
+import type { ElementPatch } from "./patches";
+import { removalOf } from "../yard/removals";
+import { RemovedElement, type Gone } from "./RemovedElement";
+import { SaveNotices } from "../plan/SaveNotices";
 import { SectionDrawing } from "./SectionDrawing";
 import { useElementSave } from "./useElementSave";
 import { useLasting } from "./useLasting";
@@ -36,10 +39,9 @@ const UNDER_THE_STRIP = "[&_:is(input,button,summary,a)]:scroll-mt-32";
 
 /** One wall, roof, door or opening: what it is made of, what it stops, and what another one would do. */
 export function WallDetail({ projectId, elementId, library, may }: WallDetailProps) {
-  const { answer, before, errors, trouble, conflict, save, takeTheirs, keepMine, retry } = useElementSave(
-    projectId,
-    elementId,
-  );
+  const { save, planned, errors, patch } = useElementSave(projectId, elementId);
+  const { answer, before } = save;
+  const [removed, setRemoved] = useState<Gone>();
   const saving = useAtomValue(savingAtom);
   const weighing = useLasting(saving, 400);
   const [markedKey, setMarkedKey] = useState<string>();
@@ -54,7 +56,12 @@ export function WallDetail({ projectId, elementId, library, may }: WallDetailPro
     area: element?.area ?? 0,
   });
   const choices = useMemo(() => choicesFor(plan, library, elementId), [plan, library, elementId]);
-  if (!element) return <Removed indexHref={wallsAddress(projectId)} />;
+  if (!element) return <RemovedElement projectId={projectId} save={save} removed={removed} />;
+  async function remove(gone: NonNullable<typeof element>) {
+    const { changes, undo } = removalOf(answer.plan, { part: "elements", id: gone.id });
+    const saved = await planned(() => changes, `place/${gone.id}`);
+    if (saved?.kind === "saved") setRemoved({ name: gone.name, undo, revision: saved.answer.revision });
+  }
   const words = wordsOf(element);
   const litBand = leadOf(answer)?.bandIndex ?? 1;
   const marked = choices.list.find(({ key }) => key === markedKey);
@@ -73,27 +80,11 @@ export function WallDetail({ projectId, elementId, library, may }: WallDetailPro
         budgetHref={budgetAddress(projectId)}
         elementId={elementId}
       />
-      {conflict && (
-        <ConflictPanel
-          name={conflict.name}
-          when={conflict.when}
-          {...comparePatch(
-            conflict.patch,
-            conflict.current.plan.elements.find(({ id }) => id === elementId) ?? element,
-            (key) => nameOfConstruction(conflict.current.plan, library, key),
-          )}
-          saving={saving}
-          onKeep={keepMine}
-          onTake={takeTheirs}
-        />
-      )}
-      {trouble && (
-        <SaveTrouble
-          trouble={trouble}
-          signInHref={signInAddress(elementAddress(projectId, elementId))}
-          onRetry={retry}
-        />
-      )}
+      <SaveNotices
+        save={save}
+        here={elementAddress(projectId, elementId)}
+        words={elementComparison(save.conflict?.current.plan ?? plan, library, elementId)}
+      />
       <WallHead
         element={element}
         sheet={sheet}
@@ -135,7 +126,7 @@ export function WallDetail({ projectId, elementId, library, may }: WallDetailPro
                   onMark={setMarkedKey}
                   onChoose={(key) => {
                     setMarkedKey(undefined);
-                    void save(patchFor(library, key));
+                    patch(patchFor(library, key));
                   }}
                 />
               ) : (
@@ -151,7 +142,20 @@ export function WallDetail({ projectId, elementId, library, may }: WallDetailPro
               element={element}
               lockedBecause={may.edit ? undefined : may.reason}
               errors={errors}
-              onChange={save}
+              onChange={patch}
+            />
+            {element.kind === "duct" && (
+              <DuctFields element={element} save={save} planned={planned} lockedBecause={may.edit ? undefined : may.reason} />
+            )}
+          </Sheet>
+          <Sheet className="border-t border-rule">
+            <ElementPlace
+              element={element}
+              plan={plan}
+              save={save}
+              planned={planned}
+              locked={!may.edit}
+              onRemove={() => void remove(element)}
             />
           </Sheet>
         </div>
@@ -180,14 +184,6 @@ export function WallDetail({ projectId, elementId, library, may }: WallDetailPro
         </Sheet>
       </div>
     </div>
-  );
-}
-
-function Removed({ indexHref }: { indexHref: string }) {
-  return (
-    <Sheet heading="This is no longer in the plan">
-      <Link href={indexHref}>To the walls &amp; openings</Link>
-    </Sheet>
   );
 }
 

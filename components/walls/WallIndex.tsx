@@ -1,6 +1,8 @@
 import Link from "next/link";
+import type { ReactNode } from "react";
 import { OCTAVE_BANDS } from "../../lib/noise/bands";
 import { bandWords, formatNumber, formatQuantity, percent, withUnit, wholeDecibels } from "../format";
+import { Icon } from "../marks/Icon";
 import { Sheet } from "../ui/Sheet";
 import { MiniSection } from "./MiniSection";
 import type { WallFace, WallRow } from "./wallRows";
@@ -11,13 +13,17 @@ interface Props {
   /** Index of the band the figures are taken at, and the listener whose shares they are. */
   litBand: number;
   listener?: string;
+  /** What does not fit in a face, in sentences. */
+  doubtsOf?: (faceId: string) => readonly string[];
+  /** What may be changed of a face, under its rows. */
+  panelOf?: (faceId: string) => ReactNode;
 }
 
 const columns =
   "grid grid-cols-[104px_minmax(0,1fr)] gap-x-4 mid:grid-cols-[104px_minmax(0,1fr)_repeat(3,68px)] desk:grid-cols-[104px_minmax(0,1fr)_repeat(5,84px)]";
 
 /** Every wall, roof, door and opening, face by face; each section to one scale. */
-export function WallIndex({ faces, litBand, listener }: Props) {
+export function WallIndex({ faces, litBand, listener, doubtsOf, panelOf }: Props) {
   if (faces.length === 0) return <EmptyIndex />;
   const band = bandWords(OCTAVE_BANDS[litBand]!);
   return (
@@ -29,12 +35,20 @@ export function WallIndex({ faces, litBand, listener }: Props) {
           aria-label={face.name}
           className="border-t border-rule first-of-type:border-t-0"
         >
-          <h2 className="px-4 pb-1 pt-5 text-part mid:px-6.5">{face.name}</h2>
+          <h2 className="break-words px-4 pb-1 pt-5 text-part mid:px-6.5">{face.name}</h2>
+          {doubtsOf?.(face.id).map((words) => (
+            <p key={words} className="flex gap-2 px-4 pb-1 text-second text-ink mid:px-6.5">
+              <Icon name="note" size={18} />
+              <span className="min-w-0">{words}</span>
+            </p>
+          ))}
           <ul>
             {face.rows.map((row) => (
               <IndexRow key={row.id} row={row} band={band} listener={listener} />
             ))}
+            {face.rows.length === 0 && <li className="px-4 py-2 text-second text-ink2 mid:px-6.5">Nothing stands in it yet: no sound passes here.</li>}
           </ul>
+          {panelOf?.(face.id)}
         </section>
       ))}
     </Sheet>

@@ -27,11 +27,12 @@ export interface WallFace {
   rows: WallRow[];
 }
 
-/** The elements of a plan face by face, in the order of its paths; a face without elements is left out. */
+/** The elements of a plan face by face, in the order of its paths; a face without elements is left out unless it is asked for. */
 export function wallFaces(
   answer: Answer,
   sheets: readonly ConstructionSheet[],
   hrefOf: (elementId: string) => string,
+  withEmpty = false,
 ): WallFace[] {
   const { plan, verdict } = answer;
   const lead = leadOf(answer);
@@ -55,6 +56,6 @@ export function wallFaces(
   };
   return plan.paths.flatMap((path) => {
     const rows = plan.elements.filter(({ pathId }) => pathId === path.id).map(rowOf);
-    return rows.length === 0 ? [] : [{ id: path.id, name: path.name, rows }];
+    return rows.length === 0 && !withEmpty ? [] : [{ id: path.id, name: path.name, rows }];
   });
 }

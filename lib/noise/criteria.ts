@@ -26,6 +26,10 @@ const nr = lineSchema.parse(table.nr);
 /** Editions of the NC curves that are held, the default first. */
 export const NC_EDITIONS: readonly string[] = families.map(({ key }) => key);
 
+/** Every family of curves that a limit may be read in, with the document it was read from. */
+export const CURVE_EDITIONS = [...families, nr].map(({ metric, key, label, provenance }) => ({ metric, key, label, provenance }));
+export type CurveEdition = (typeof CURVE_EDITIONS)[number];
+
 /** A single-number rating and the band that decides it; of two bands with the same rating the lower one is named. */
 export interface Rating {
   /** NaN where a band is unknown, -Infinity for silence, +Infinity above the family. */
@@ -113,7 +117,7 @@ export function nrLevels(rating: number): Float64Array {
 const QUIETEST = -100;
 
 /** Limit per band, dB; NaN where the criterion says nothing. All NaN for limits on a weighted total. */
-export function limitLevels(criterion: Criterion): Float64Array {
+export function limitLevels(criterion: Pick<Criterion, "metric" | "value" | "levels" | "edition">): Float64Array {
   const { metric, value, levels, edition } = criterion;
   if (metric === "dBA" || metric === "dBC") return new Float64Array(BAND_COUNT).fill(NaN);
   if (levels) return toArithmetic(levels).map((limit) => Math.max(QUIETEST, limit));

@@ -118,6 +118,7 @@ export const receiverSchema = z.object({
 });
 
 export const METRICS = ["NC", "NR", "dBA", "dBC", "curve"] as const;
+export const WINDOW_STATES = ["shut", "ajar", "open"] as const;
 
 /** A limit, copied into the project when chosen: later editions of the library change no old verdict. */
 export const criterionSchema = z.object({
@@ -134,6 +135,18 @@ export const criterionSchema = z.object({
   hours: z.object({ from: z.string().max(5), to: z.string().max(5) }).nullable(),
   /** How and where it is taken: "in bed, window ajar". */
   place: z.string().max(200).default(""),
+  /** The clause in its own words. This and what follows describes the limit; the verdict rests on none of it. */
+  clauseText: z.string().max(2000).default(""),
+  inForce: z.iso.date().nullable().default(null),
+  readOn: z.iso.date().nullable().default(null),
+  indoors: z.boolean().nullable().default(null),
+  /** How the listener's window stands while it is taken. */
+  window: z.enum(WINDOW_STATES).nullable().default(null),
+  /** The night itself, dB over the nine bands, and how it was come by. */
+  background: levelSpectrum.nullable().default(null),
+  backgroundSays: z.string().max(200).default(""),
+  /** Where the levels are the night's plus a figure: that figure, dB. */
+  above: z.number().min(-20).max(60).nullable().default(null),
   provenance: provenanceSchema,
 });
 
@@ -199,3 +212,5 @@ export type Receiver = z.infer<typeof receiverSchema>;
 export type Criterion = z.infer<typeof criterionSchema>;
 export type Situation = z.infer<typeof situationSchema>;
 export type Plan = z.infer<typeof planSchema>;
+/** A plan before its schema has filled in what was left out. */
+export type UnreadPlan = z.input<typeof planSchema>;

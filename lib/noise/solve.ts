@@ -1,4 +1,5 @@
 import { receiverVerdict } from "./answer/receiverVerdict";
+import { sourceVerdict } from "./answer/sourceVerdict";
 import { weigh, type Weighing } from "./answer/weighing";
 import { effectiveLoss, type EffectiveLoss } from "./effective";
 import { levelOf } from "./levels";
@@ -143,6 +144,7 @@ export function solve(plan: Plan, { contributions = MOST_CONTRIBUTIONS }: SolveO
     elements: recordOf(plan.elements, ({ id, area }) => [id, elementVerdict(area, field.passings.get(id)!)]),
     constructions: recordOf(losses, ([id, loss]) => [id, constructionVerdict(loss)]),
     spaces: recordOf(field.rooms, (room) => [room.space.id, spaceVerdict(room)]),
+    sources: recordOf(field.sources, (model) => [model.source.id, sourceVerdict(field, model)]),
     notes,
   };
 }

@@ -186,6 +186,21 @@ export interface SpaceVerdict {
   statisticalFrom: number | null;
 }
 
+export interface SourceVerdict {
+  /** One standard deviation of its power per band, dB. */
+  doubts: number[];
+  /** Alone at work and 1 m away in its own room; null outdoors, in a duct and without a room. */
+  near: {
+    /** m. */
+    distance: number;
+    levels: OutSpectrum;
+    /** Of the bands that are known. */
+    dba: Out;
+    /** Minutes a day until the daily measure of bare ears is full at that level; null in silence. */
+    minutes: number | null;
+  } | null;
+}
+
 export interface Note {
   partId: string | null;
   /** A sentence for the reader: "The fan has no sound level at 8 kHz." */
@@ -200,5 +215,7 @@ export interface Verdict {
   elements: Record<string, ElementVerdict>;
   constructions: Record<string, ConstructionVerdict>;
   spaces: Record<string, SpaceVerdict>;
+  /** Absent where nothing could be weighed. */
+  sources?: Record<string, SourceVerdict>;
   notes: Note[];
 }

@@ -51,8 +51,8 @@ describe("a yard", () => {
 });
 
 describe("the list of yards", () => {
-  const readerOf = ({ id, name, email }: User): Reader => ({ id, name, email, theme: "system", figures: { units: "metric", mark: "point" }, session: { idHash: "", keep: false, toRenew: false } });
-  const namesFor = async (user: User) => (await listProjects(readerOf(user))).map(({ project }) => project.id).sort();
+  const readerOf = ({ id, name, email }: User): Reader => ({ id, name, email, theme: "system", figures: { units: "metric", mark: "point" }, session: { idHash: "", handle: "none", keep: false, toRenew: false, proved: false } });
+  const namesFor = async (user: User) => (await listProjects(readerOf(user))).listed.map(({ project }) => project.id).sort();
 
   it("holds all of the team for its members, the invited ones for others, and none of a stranger's", async () => {
     const { users, project, sibling, foreign } = stage;
@@ -63,7 +63,7 @@ describe("the list of yards", () => {
   });
 
   it("names people and roles, says which one reads, and no address", async () => {
-    const [listed] = await listProjects(readerOf(stage.users.client));
+    const { listed: [listed] } = await listProjects(readerOf(stage.users.client));
     expect(listed!.people.map(({ name, role, you }) => [name, role, you])).toEqual([["Olga", "owner", false], ["Aron", "acoustician", false], ["Clara", "client", true], ["Bert", "builder", false]]);
     expect(JSON.stringify(listed)).not.toContain("@");
   });

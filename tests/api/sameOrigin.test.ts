@@ -37,6 +37,15 @@ describe("a change can only be asked from our own pages", () => {
     }
   });
 
+  it.each(sayings.filter(([, , passes]) => !passes))("a form of text is refused as well: %s", async (_, headers) => {
+    for (const { name, method, handler } of routes) {
+      const params = { projectId: stage.project.id, part: "fences", partId: stage.plan.fences[0]!.id };
+      const form = { "content-type": "text/plain", ...headers };
+      const answer = await ask(handler, { method, cookie: stage.cookies.owner, params, headers: form, body: method === "DELETE" ? undefined : "x=1" });
+      expect(answer.status, name).toBe(403);
+    }
+  });
+
   it("a form of another page, sent as text, is refused twice over", async () => {
     const { handler } = routes.find(({ name }) => name.startsWith("POST /api/projects"))!;
     const params = { projectId: stage.project.id, part: "fences" };

@@ -33,7 +33,7 @@ describe("the cookie", () => {
     const user = await buildUser({ email: "cookie@stillyard.example", passwordHash: await hashPassword(PASSWORD) });
     const answer = await ask(POST, { method: "POST", body: { email: " Cookie@Stillyard.example ", password: PASSWORD } });
     expect([answer.status, await answer.json()]).toEqual([200, { next: "/projects" }]);
-    const header = answer.headers.get("set-cookie")!;
+    const header = answer.headers.getSetCookie()[0]!;
     expect(header).toMatch(/^__Host-stillyard=/);
     expect(header.split("; ").slice(1).sort()).toEqual(["HttpOnly", "Path=/", "SameSite=Lax", "Secure"]);
     expect(header.length).toBeLessThan(512);
@@ -225,7 +225,7 @@ describe("signing in", () => {
   });
 
   it("when more than two work and twenty wait, the next is asked to come back", async () => {
-    const tries = await Promise.all(Array.from({ length: 26 }, () => ask(POST, { method: "POST", body: { email: "q@stillyard.example", password: PASSWORD } })));
+    const tries = await Promise.all(Array.from({ length: 26 }, (_, count) => ask(POST, { method: "POST", body: { email: `q${count}@stillyard.example`, password: PASSWORD } })));
     const statuses = tries.map(({ status }) => status);
     expect(statuses.filter((status) => status === 503).length).toBeGreaterThanOrEqual(3);
     expect(statuses.filter((status) => status === 401).length).toBeGreaterThanOrEqual(20);

@@ -49,13 +49,13 @@ describe("the database", () => {
     expect((await change()).status).toBe(200);
   });
 
-  it("with every connection taken: 503 after 5 s, health answers meanwhile, and it recovers at once", async () => {
+  it("with every connection taken: a hundred requests are told 503 after 5 s, health answers meanwhile, and it recovers at once", async () => {
     const holders = await Promise.all(Array.from({ length: 10 }, () => connection.transaction()));
-    const waiting = seconds(() => Promise.all(Array.from({ length: 20 }, open)));
+    const waiting = seconds(() => Promise.all(Array.from({ length: 100 }, open)));
     const health = await seconds(async () => HEALTH());
     expect([health.result.status, health.took < 1]).toEqual([200, true]);
     const { took, result } = await waiting;
-    expect(result.map(({ status }) => status)).toEqual(Array(20).fill(503));
+    expect(result.map(({ status }) => status)).toEqual(Array(100).fill(503));
     expect(took).toBeLessThan(7);
     await Promise.all(holders.map((holder) => holder.rollback()));
     expect((await open()).status).toBe(200);

@@ -7,6 +7,8 @@ import { address, listenForComplaints, openBrowser, signIn } from "../browser";
 const project = `/projects/${idOf("project", "plumtree-row")}`;
 const screens = {
   "the yards": "/projects",
+  "the archived yards": "/projects?show=archived",
+  "a new yard": "/projects/new",
   "the budget": project,
   "the budget of a dB(A) limit": `/projects/${idOf("project", "dell-end")}`,
   "the budget without a listener": `/projects/${idOf("project", "tern-cottage")}`,

@@ -81,22 +81,11 @@ describe("a rating", () => {
   });
   test("a level at 1 kHz equals its NR number", () => expect(nrLevels(33)[5]).toBe(33));
   test("a limit of silence stands for the least level", () => {
-    const shared = {
-      id: "c",
-      receiverId: "r",
-      name: "n",
+    const limits = limitLevels({
+      metric: "curve",
       value: null,
       edition: "",
-      averaging: "loudest",
-      hours: null,
-      place: "",
-    } as const;
-    const provenance = { document: "d", clause: "", memory: false };
-    const limits = limitLevels({
-      ...shared,
-      metric: "curve",
       levels: ["silent", 30, null, 30, 30, 30, 30, 30, 30],
-      provenance,
     });
     expect(Array.from(limits.slice(0, 3))).toEqual([-100, 30, NaN]);
   });

@@ -1,7 +1,7 @@
 import { BAND_COUNT } from "../bands";
 import type { Construction } from "../construction";
 import type { PathElement } from "../elements";
-import { planSchema, type Plan, type Receiver, type Space, type Surface } from "../plan";
+import { planSchema, type Plan, type Receiver, type Space, type Surface, type UnreadPlan } from "../plan";
 import { areaFromDecay } from "../rooms";
 import type { Basis } from "../spectrum";
 import { CaseFault, readWith } from "./fault";
@@ -80,7 +80,7 @@ function elementOf(given: Budget["elements"][number], i: number, constructionId:
   return { ...placed, kind: given.kind, params: {} };
 }
 
-function criteriaOf({ receivers }: Budget): Plan["criteria"] {
+function criteriaOf({ receivers }: Budget): UnreadPlan["criteria"] {
   return receivers.flatMap(({ id, criterion }, i) => {
     if (!criterion) return [];
     const levels = criterion.kind === "curve" ? criterion.levels : null;
@@ -166,7 +166,7 @@ function receiverOf({ room, position, criterion: _, ...given }: Budget["receiver
 export function planOfBudget(budget: Budget): Plan {
   const { rooms, elements, fences, receivers } = budget;
   const constructions = constructionsOf(budget);
-  const plan: Plan = {
+  const plan: UnreadPlan = {
     lot: lotOf(budget),
     buildings: [],
     spaces: rooms.map(spaceOf),

@@ -43,7 +43,8 @@ function openingOf({ kind, params }: z.infer<typeof anyElement>): { field: strin
 /** Any element of a plan. An opening is never larger than what it is in. */
 export const elementSchema = anyElement.superRefine((element, context) => {
   const opening = openingOf(element);
-  if (!opening || opening.area <= element.area) return;
+  // An area that is none is refused by its own schema.
+  if (!opening || opening.area <= element.area || element.area <= 0) return;
   context.addIssue({ code: "custom", path: ["params", opening.field], message: "It cannot be larger than the whole." });
 });
 export type PathElement = z.infer<typeof elementSchema>;

@@ -4,6 +4,7 @@ import { deviationSpectrum, levelSpectrum, provenanceSchema } from "../spectrum"
 
 const metres = z.number().min(-1000).max(1000);
 const id = z.string().min(1).max(64);
+const clock = z.string().refine((hour) => /^([01]\d|2[0-3]):[0-5]\d$/.test(hour), "An hour is needed, such as 18:30.");
 
 /** Where a kind of source works: in a room, outdoors, through a fan's duct, or as a given level at an element. */
 export type SourcePlacement = "room" | "outdoor" | "fan" | "incident";
@@ -24,6 +25,8 @@ export const placedSource = {
   deviation: deviationSpectrum.nullable(),
   basis: z.enum(SOURCE_BASES),
   provenance: provenanceSchema,
+  /** Local hours of a day it is at work; they are shown beside the hours of a limit. What is weighed stands in the situations. */
+  hours: z.object({ from: clock, to: clock }).nullable().optional(),
 };
 
 export interface SourceKind<N extends string, S extends z.ZodRawShape> {

@@ -1,0 +1,3 @@
+import { emailCheckRoute } from "@/app/_server/accounts/emailCheck";
+
+export const POST = emailCheckRoute;

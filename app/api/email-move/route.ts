@@ -1,0 +1,3 @@
+import { emailMoveRoute } from "@/app/_server/accounts/emailMove";
+
+export const POST = emailMoveRoute;

@@ -1,0 +1,3 @@
+import { emailUndoRoute } from "@/app/_server/accounts/emailMove";
+
+export const POST = emailUndoRoute;

@@ -1,0 +1,3 @@
+import { emailMoveWishRoute } from "@/app/_server/accounts/emailMove";
+
+export const POST = emailMoveWishRoute;

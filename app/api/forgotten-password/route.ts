@@ -1,0 +1,3 @@
+import { forgottenPasswordRoute } from "@/app/_server/accounts/forgottenPassword";
+
+export const POST = forgottenPasswordRoute;

@@ -1,0 +1,3 @@
+import { newPasswordRoute } from "@/app/_server/accounts/newPassword";
+
+export const POST = newPasswordRoute;

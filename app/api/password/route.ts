@@ -1,0 +1,3 @@
+import { changePasswordRoute } from "@/app/_server/accounts/changePassword";
+
+export const POST = changePasswordRoute;

@@ -1,0 +1,3 @@
+import { proofRoute } from "@/app/_server/accounts/proof";
+
+export const POST = proofRoute;

@@ -1,0 +1,3 @@
+import { endDeviceRoute } from "@/app/_server/accounts/devices";
+
+export const DELETE = endDeviceRoute;

@@ -1,0 +1,3 @@
+import { endOtherDevicesRoute } from "@/app/_server/accounts/devices";
+
+export const DELETE = endOtherDevicesRoute;

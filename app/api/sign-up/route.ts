@@ -1,0 +1,3 @@
+import { signUpRoute } from "@/app/_server/accounts/signUp";
+
+export const POST = signUpRoute;
