@@ -1,3 +1,4 @@
+import { availableParallelism } from "node:os";
 import { fileURLToPath } from "node:url";
 import { defineConfig } from "vitest/config";
 
@@ -7,6 +8,8 @@ const alias = { "@": here("."), "server-only": here("tests/empty.ts") };
 
 export default defineConfig({
   test: {
+    // Many files wait for servers that end and rise again: a core left over would be idle.
+    maxWorkers: availableParallelism(),
     slowTestThreshold: 5_000,
     reporters: ["default", "./tests/closing-line.ts"],
     projects: [
@@ -46,6 +49,7 @@ export default defineConfig({
           name: "journeys",
           environment: "node",
           include: ["tests/journeys/**/*.test.ts"],
+          expect: { poll: { timeout: 15_000 } },
           globalSetup: ["tests/served.ts"],
           setupFiles: ["tests/ownProduct.ts"],
           fileParallelism: false,

@@ -2,7 +2,7 @@ import "@fontsource-variable/atkinson-hyperlegible-next/wght.css";
 import "@fontsource-variable/besley/wght.css";
 import "./globals.css";
 import type { Metadata, Viewport } from "next";
-import { cookies } from "next/headers";
+import { cookies, headers } from "next/headers";
 import { connection } from "next/server";
 import type { ReactNode } from "react";
 import { readTheme, THEME_COOKIE } from "@/components/frame/theme";
@@ -28,7 +28,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   return (
     <html lang="en" data-theme={readTheme(jar.get(THEME_COOKIE)?.value)}>
       <body>
-        <WidthClassProvider initial={readWidthClass(jar.get(WIDTH_COOKIE)?.value)}>{children}</WidthClassProvider>
+        <WidthClassProvider initial={readWidthClass(jar.get(WIDTH_COOKIE)?.value, (await headers()).get("user-agent") ?? undefined)}>{children}</WidthClassProvider>
       </body>
     </html>
   );

@@ -77,10 +77,12 @@ interface Asked<P> {
   revision?: number;
   body?: unknown;
   headers?: Record<string, string>;
+  /** What stands behind the path of the address. */
+  query?: string;
 }
 
 /** Asks a route as a page of ours would; headers given override, and an empty one is left out. */
-export async function ask<P = object>(handler: Handler<P>, { method = "GET", params, cookie, revision, body, headers = {} }: Asked<P> = {}): Promise<Response> {
+export async function ask<P = object>(handler: Handler<P>, { method = "GET", params, cookie, revision, body, headers = {}, query = "" }: Asked<P> = {}): Promise<Response> {
   const all: Record<string, string> = {
     ...(method !== "GET" && { "sec-fetch-site": "same-origin" }),
     ...(body !== undefined && { "content-type": "application/json" }),
@@ -90,6 +92,6 @@ export async function ask<P = object>(handler: Handler<P>, { method = "GET", par
   };
   const sent = Object.fromEntries(Object.entries(all).filter(([, value]) => value !== ""));
   const text = typeof body === "string" ? body : body === undefined ? undefined : JSON.stringify(body);
-  const request = new Request("http://localhost:3000/api", { method, headers: sent, body: text });
+  const request = new Request(`http://localhost:3000/api${query}`, { method, headers: sent, body: text });
   return handler(request, { params: Promise.resolve((params ?? {}) as P) });
 }

@@ -42,7 +42,7 @@ function DeviceLine({ one, moment, onEnd }: { one: Device; moment: (iso: string)
       {one.current ? (
         <Tag icon={<Icon name="tick" size={16} />}>here</Tag>
       ) : (
-        <Button onClick={onEnd} aria-label={`End ${one.device}, last seen ${moment(one.seenAt)}`}>
+        <Button onClick={onEnd} aria-label={`End ${inSentence(one.device)}, last seen ${moment(one.seenAt)}`}>
           End it
         </Button>
       )}
@@ -68,7 +68,7 @@ export function DevicesSheet({ devices, now }: Props) {
     if (!answered) return;
     if (!isEnded(answered)) return setTrouble((answered.kind !== "done" && answered.message) || "Try again in a few seconds.");
     setEnded((before) => new Set([...before, ...gone.map(({ key }) => key)]));
-    setSays(gone.length === 1 ? `Ended: ${gone[0]!.device}.` : "All others are ended.");
+    setSays(gone.length === 1 ? `Ended: ${inSentence(gone[0]!.device)}.` : "All others are ended.");
     // The pressed button is gone with its line.
     place.current?.focus();
   }
@@ -77,7 +77,7 @@ export function DevicesSheet({ devices, now }: Props) {
     <Sheet heading="Where you are signed in" says="a device that is ended has to sign in again">
       <ul>
         {live.map((one) => (
-          <DeviceLine key={one.key} one={one} moment={moment} onEnd={() => end(`end ${one.device}`, [one], deviceRoute(one.key))} />
+          <DeviceLine key={one.key} one={one} moment={moment} onEnd={() => end(`end ${inSentence(one.device)}`, [one], deviceRoute(one.key))} />
         ))}
       </ul>
       <p ref={place} tabIndex={-1} role="status" className="min-h-5 text-second text-ink2">
@@ -93,3 +93,5 @@ export function DevicesSheet({ devices, now }: Props) {
     </Sheet>
   );
 }
+
+const inSentence = (device: string) => device.charAt(0).toLowerCase() + device.slice(1);

@@ -3,9 +3,11 @@
 import { useState } from "react";
 import type { Criterion } from "@/lib/noise/plan";
 import { formatNumber, withUnit } from "../format";
+import { Disclosure } from "../ui/Disclosure";
 import { NineBandRow } from "../ui/NineBandRow";
 import { NumberField } from "../ui/NumberField";
 import { Select } from "../ui/Select";
+import { useWidthClass } from "../ui/useWidthClass";
 import { levelsOf, nightOf, typeAbove, typeFigure, typeLevels, typeNight, typeNumber, type LimitLibrary } from "./limitPatches";
 import { figureWords, formOf, formWords, LIMIT_FORMS, weightedWords, type LimitForm } from "./limitWords";
 import { SavedText } from "../ui/SavedText";
@@ -140,7 +142,17 @@ function AboveForm({ limit, library, edits }: FigureProps) {
 }
 
 /** The night without you: what a test has to tell the limit from. */
-function NightRow({ limit, library, edits, lit, onLight, form }: FigureProps & { form: LimitForm }) {
+function NightRow(props: FigureProps & { form: LimitForm }) {
+  const small = useWidthClass() === 390;
+  if (!small || props.form === "above") return <NightFields {...props} />;
+  return (
+    <Disclosure summary="The night itself, in nine bands">
+      <NightFields {...props} />
+    </Disclosure>
+  );
+}
+
+function NightFields({ limit, library, edits, lit, onLight, form }: FigureProps & { form: LimitForm }) {
   return (
     <div className="grid gap-4">
       <NineBandRow

@@ -21,7 +21,7 @@ import { LimitChooser } from "./LimitChooser";
 import { LimitFigures } from "./LimitFigures";
 import { replaceBy, type LimitLibrary } from "./limitPatches";
 import { figureWords, takenWords } from "./limitWords";
-import { LockedLine, ReadFigures, ReadLimit } from "./ReadLimit";
+import { ReadFigures, ReadLimit } from "./ReadLimit";
 import { SavedText } from "../ui/SavedText";
 import type { Edits } from "./useLimitEdits";
 import { WindowChoice } from "./WindowChoice";
@@ -91,10 +91,8 @@ export function LimitView(props: Props) {
         <div className="max-w-xl">
           <h2 className="text-section">No limit yet</h2>
           <p className="mt-1 mb-4 text-ink2">{listener.name} is not weighed. {may.edit ? "Choose one to copy, or take “Own figures” and type your nine." : ""}</p>
-          {may.edit ? (
+          {may.edit && (
             <LimitChooser records={library.records} label="A limit of the library" verb="Copy this limit" saving={save.saving} error={save.errorOf(`${listener.id} limit`)} onCopy={onCopy} />
-          ) : (
-            <LockedLine reason={may.reason} />
           )}
         </div>
         <Deference />
@@ -124,7 +122,7 @@ function Standing(props: Props & { limit: Criterion }) {
               <ClauseFields limit={limit} edits={edits} />
             </div>
           ) : (
-            <ReadLimit limit={limit} reason={may.reason} />
+            <ReadLimit limit={limit} />
           )}
         </section>
         <section aria-labelledby="hours" className="grid min-w-0 content-start gap-6 border-rule p-4 mid:p-6.5 max-desk:border-t desk:border-l">

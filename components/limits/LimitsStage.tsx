@@ -12,7 +12,7 @@ import { SaveNotices } from "../plan/SaveNotices";
 import { usePlanSave, type PlanSave } from "../plan/usePlanSave";
 import { litReceiverAtom } from "../state/plan";
 import { Button } from "../ui/Button";
-import { Sheet } from "../ui/Sheet";
+import { FoldedSheet } from "../ui/FoldedSheet";
 import { Strip } from "../ui/Strip";
 import { inSentence } from "../verdict/chartWords";
 import { useLasting } from "../walls/useLasting";
@@ -125,7 +125,7 @@ export function LimitsStage({ projectId, library, may }: LimitsStageProps) {
           <div id={ADD} ref={form} className="border-t border-rule p-4 mid:px-6.5">
             {may.edit && !empty && (
               <Button icon={<Icon name={formOpen ? "remove" : "plus"} size={18} />} aria-expanded={formOpen} onClick={() => setAdding(!adding)}>
-                {formOpen ? "Add none" : "Add a listener"}
+                {formOpen ? "Not now" : "Add a listener"}
               </Button>
             )}
             {formOpen && (
@@ -163,7 +163,7 @@ export function LimitsStage({ projectId, library, may }: LimitsStageProps) {
         )}
       </div>
       {listener && (
-        <Sheet heading="The listener" className="mt-3 mid:mt-5">
+        <FoldedSheet heading="The listener" className="mt-3 mid:mt-5">
           <div className="max-w-3xl">
             {may.edit ? (
               <ListenerFields
@@ -173,10 +173,10 @@ export function LimitsStage({ projectId, library, may }: LimitsStageProps) {
                 onRemove={() => void save.save({ act: "remove", part: "receivers", id: listener.id }, `${listener.id} remove`)}
               />
             ) : (
-              <ReadListener listener={listener} plan={plan} reason={may.reason} />
+              <ReadListener listener={listener} plan={plan} />
             )}
           </div>
-        </Sheet>
+        </FoldedSheet>
       )}
     </div>
   );

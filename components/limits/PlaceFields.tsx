@@ -1,6 +1,7 @@
 "use client";
 
 import { useState } from "react";
+import { keepTyped } from "../plan/keepTyped";
 import { QuantityField } from "../ui/QuantityField";
 
 type Place = [number, number, number];
@@ -21,7 +22,7 @@ export function PlaceFields({ position, error, onChange }: Props) {
   const [half, setHalf] = useState<Half>(position ?? [null, null, null]);
   if (JSON.stringify(stored) !== JSON.stringify(position)) {
     setStored(position);
-    setHalf(position ?? [null, null, null]);
+    setHalf(position ? (keepTyped(half, position, stored) as Half) : [null, null, null]); // three stay three
   }
   function type(axis: number, value: number | null) {
     const next = half.map((at, i) => (i === axis ? value : at)) as Half;

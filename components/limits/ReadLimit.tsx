@@ -33,7 +33,7 @@ function Lines({ lines }: { lines: readonly (readonly [string, string])[] }) {
 }
 
 /** A limit as text: for who may read it and not change it. */
-export function ReadLimit({ limit, reason }: { limit: Criterion; reason: string }) {
+export function ReadLimit({ limit }: { limit: Criterion }) {
   return (
     <div className="grid gap-4">
       {limit.clauseText && <blockquote className="rounded-control border border-edge p-4 text-lead whitespace-pre-line">“{limit.clauseText}”</blockquote>}
@@ -50,12 +50,11 @@ export function ReadLimit({ limit, reason }: { limit: Criterion; reason: string 
           ["Their window", limit.window ? windowWords[limit.window].toLowerCase() : "not said"],
         ]}
       />
-      <LockedLine reason={reason} />
     </div>
   );
 }
 
-export function ReadListener({ listener, plan, reason }: { listener: Receiver; plan: Plan; reason: string }) {
+export function ReadListener({ listener, plan }: { listener: Receiver; plan: Plan }) {
   return (
     <div className="grid gap-4">
       <Lines
@@ -65,7 +64,6 @@ export function ReadListener({ listener, plan, reason }: { listener: Receiver; p
           ["In a sentence", listener.says],
         ]}
       />
-      <LockedLine reason={reason} />
     </div>
   );
 }

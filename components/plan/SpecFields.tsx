@@ -11,6 +11,7 @@ import { QuantityField } from "../ui/QuantityField";
 import { toShown, unitName } from "../ui/quantities";
 import { Select } from "../ui/Select";
 import { TextField } from "../ui/TextField";
+import { useTyped } from "../ui/useTyped";
 import type { FieldSpec } from "./fieldSpec";
 import type { PlannedSave } from "./usePlannedSave";
 import type { PlanSave } from "./usePlanSave";
@@ -97,22 +98,13 @@ function TickField({ spec, error, onCommit }: { spec: Of<"tick">; error?: string
 
 /** Words that save when the field is left or on Enter; a refused text stays. */
 function WordsField({ spec, error, onCommit }: { spec: Of<"words">; error?: string; onCommit: (value: string) => void }) {
-  const [text, setText] = useState(spec.value);
-  const [stored, setStored] = useState(spec.value);
-  const [sent, setSent] = useState<string>();
+  const typed = useTyped(spec.value, (words) => words);
   const [complaint, setComplaint] = useState<string>();
-  if (stored !== spec.value) {
-    setStored(spec.value);
-    setSent(undefined);
-    if (text.trim() === stored || text.trim() === spec.value || text.trim() === sent) setText(spec.value);
-  }
   function commit() {
-    const typed = text.trim();
-    const empty = typed === "" && !spec.optional;
+    const words = typed.text.trim();
+    const empty = words === "" && !spec.optional;
     setComplaint(empty ? "This cannot be empty." : undefined);
-    if (empty || typed === spec.value || typed === sent) return;
-    setSent(typed);
-    onCommit(typed);
+    if (!empty && typed.hand(words)) onCommit(words);
   }
   return (
     <TextField
@@ -120,10 +112,10 @@ function WordsField({ spec, error, onCommit }: { spec: Of<"words">; error?: stri
       hint={spec.hint}
       maxLength={spec.most}
       autoComplete="off"
-      value={text}
+      value={typed.text}
       error={complaint ?? error}
-      onChange={(event) => setText(event.target.value)}
-      onFocus={() => setSent(undefined)}
+      onChange={(event) => typed.type(event.target.value)}
+      onFocus={typed.visit}
       onBlur={commit}
       onKeyDown={(event: KeyboardEvent) => event.key === "Enter" && commit()}
     />

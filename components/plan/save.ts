@@ -1,14 +1,9 @@
 import { changesRoute, partRoute, projectRouteAddress } from "../addresses";
 import type { Answer } from "../state/plan";
+import type { PlanChange, TouchedPart } from "./planChange";
+import { forgetUnanswered, isOwnLostAct, keyOf, type Request } from "./unanswered";
 
-/** What happened to one part of a plan. */
-export interface TouchedPart {
-  kind: string;
-  id: string;
-  act: "add" | "change" | "remove";
-  before: Record<string, unknown> | null;
-  after: Record<string, unknown> | null;
-}
+export type { PlanChange, TouchedPart } from "./planChange";
 
 export interface ChangedBy {
   name: string;
@@ -54,12 +49,6 @@ export function addPart({ values, ...written }: Written & { values: Values }): P
   return write({ method: "POST", address, body: values }, written.revision, () => false);
 }
 
-/** One change of a plan. `as` names a part that is added, "new:room", so that later changes of the list point at it. */
-export type PlanChange =
-  | { act: "add"; part: string; values: Values; as?: `new:${string}` }
-  | { act: "change"; part: string; id: string; patch: Values }
-  | { act: "remove"; part: string; id: string };
-
 /** Several changes as one: all of them or none. Sent again by itself only where nobody touched what it touches. */
 export function saveChanges({ projectId, revision, changes }: { projectId: string; revision: number; changes: readonly PlanChange[] }): Promise<Saved> {
   const ids = changes.flatMap((change) => (change.act === "add" ? [] : [change.id]));
@@ -74,39 +63,17 @@ export function saveProject({ projectId, revision, patch }: { projectId: string;
   return write({ method: "PATCH", address, body: patch }, revision, (touched) => touched.has(projectId));
 }
 
-interface Request {
-  method: "PATCH" | "POST" | "DELETE";
-  address: string;
-  body?: Values;
-}
-
-/** Sends a change; when somebody else was quicker and touched nothing this change touches, sends it once more. */
+/**
+ * Sends a change; when somebody else was quicker and touched nothing this change touches, sends it once more. A change of
+ * our own whose answer never came is nobody else's.
+ */
 async function write(request: Request, revision: number, collides: (touched: ReadonlySet<string>) => boolean): Promise<Saved> {
   const key = keyOf(request);
   const first = await send(request, revision, key);
   if (first.kind !== "stale") return first;
   const { whole, parts } = first.changedBy;
-  const touched = new Set(parts.map(({ id }) => id));
+  const touched = new Set(parts.filter((part) => !isOwnLostAct(part)).map(({ id }) => id));
   return !whole || collides(touched) ? first : send(request, first.current.revision, key);
-}
-
-/**
- * Keys of acts that had no answer. The same act asked again bears the same key, so that it is done once even if only its
- * answer was lost. Once the server has answered anything, the screen shows what is so, and the same act is a new wish.
- */
-const unanswered = new Map<string, string>();
-
-function keyOf({ method, address, body }: Request): string {
-  const act = JSON.stringify([method, address, body]);
-  const key = unanswered.get(act) ?? freshKey();
-  unanswered.set(act, key);
-  return key;
-}
-
-/** 128 bits of chance; `crypto.randomUUID` is there on secure addresses only. */
-export function freshKey(): string {
-  const bytes = crypto.getRandomValues(new Uint8Array(16));
-  return Array.from(bytes, (byte) => byte.toString(16).padStart(2, "0")).join("");
 }
 
 const SECONDS = 30;
@@ -120,7 +87,7 @@ async function send({ method, address, body }: Request, revision: number, key: s
       signal: AbortSignal.timeout(SECONDS * 1000),
     });
     const saved = await savedOf(response);
-    if (isSettled(response.status)) unanswered.clear();
+    if (isSettled(response.status)) forgetUnanswered();
     return saved;
   } catch {
     return { kind: "failed", message: "No answer from the server. What you typed is kept here; try again." };

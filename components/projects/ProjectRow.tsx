@@ -99,7 +99,7 @@ export function ProjectRow({ project, scale, now, timeZone, acts }: Props) {
     row.current?.querySelector("summary")?.focus();
   };
   return (
-    <li ref={row} className="relative grid items-center gap-x-7 gap-y-4 border-t border-rule p-4 first:rounded-t-sheet first:border-t-0 last:rounded-b-sheet hover:bg-well mid:grid-cols-[140px_minmax(0,1fr)_228px] mid:p-7 desk:grid-cols-[140px_minmax(0,1.2fr)_228px_minmax(0,1fr)] wide:grid-cols-[140px_minmax(0,1.5fr)_228px_minmax(0,1.2fr)_24px]">
+    <li ref={row} className="relative grid grid-cols-1 items-center gap-x-7 gap-y-4 border-t border-rule p-4 first:rounded-t-sheet first:border-t-0 last:rounded-b-sheet hover:bg-well mid:grid-cols-[140px_minmax(0,1fr)_228px] mid:p-7 desk:grid-cols-[140px_minmax(0,1.2fr)_228px_minmax(0,1fr)] wide:grid-cols-[140px_minmax(0,1.5fr)_228px_minmax(0,1.2fr)_24px]">
       <div className="flex items-center gap-4 pr-10 mid:contents">
         <div className="w-24 flex-none mid:w-[140px]">
           <PlanThumbnail project={project} scale={scale} />

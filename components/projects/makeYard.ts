@@ -1,5 +1,5 @@
 import { projectRouteAddress, projectsRoute } from "../addresses";
-import { freshKey } from "../plan/save";
+import { freshKey } from "../plan/unanswered";
 
 export type Made =
   | { kind: "made"; id: string; next: string }
@@ -24,7 +24,8 @@ async function ask(address: string, values: object): Promise<Made> {
     const headers = { "Content-Type": "application/json", "Idempotency-Key": key };
     const response = await fetch(address, { method: "POST", headers, body, signal: AbortSignal.timeout(30_000) });
     const made = await madeOf(response);
-    if (response.status < 500) unanswered.delete(wish);
+    // A twin on its way (409) may yet be done: the next try must bear its key.
+    if (response.status < 500 && response.status !== 409) unanswered.delete(wish);
     return made;
   } catch {
     return { kind: "failed", message: "No answer from the server. What you typed is kept here; try again." };

@@ -5,8 +5,8 @@ import type { Space } from "@/lib/noise/plan";
 import { formatNumber, withUnit } from "../format";
 import { StatusMark } from "../marks/StatusMark";
 import { Disclosure } from "../ui/Disclosure";
+import { FoldedSheet } from "../ui/FoldedSheet";
 import { NumberField } from "../ui/NumberField";
-import { Sheet } from "../ui/Sheet";
 import { breathOf, carbonDioxide, flowFor, standardFlow } from "./air";
 import { AirChart } from "./AirChart";
 import { floorArea } from "./room";
@@ -29,7 +29,7 @@ export function AirPanel({ space }: { space: Space }) {
   const floor = floorArea(space);
   const people = drumming + sitting;
   return (
-    <Sheet
+    <FoldedSheet
       heading="Air"
       says="To try out: nothing here is kept, and no level depends on it."
       beside={
@@ -68,6 +68,6 @@ export function AirPanel({ space }: { space: Space }) {
           </Disclosure>
         </div>
       </div>
-    </Sheet>
+    </FoldedSheet>
   );
 }

@@ -10,7 +10,7 @@ import { NineBandRow } from "../ui/NineBandRow";
 import { Select } from "../ui/Select";
 import { FiguresRow } from "./FiguresRow";
 import type { BySurfaces, Room } from "./room";
-import { changeRoom, ownFigures } from "./roomChanges";
+import { changeRoom, FIGURE_BOUNDS, ownFigures } from "./roomChanges";
 
 interface Props {
   room: Room;
@@ -80,8 +80,8 @@ function Typed({ room, judged, save, litBand, onLightBand, onSurfaces }: Props) 
         label={byDecay ? "Decay time" : "Absorption area"}
         unit={byDecay ? "s" : "m²"}
         values={byDecay ? absorption.seconds : absorption.area}
-        min={byDecay ? 0.02 : 0.01}
-        max={byDecay ? 30 : 10_000}
+        min={FIGURE_BOUNDS[absorption.kind][0]}
+        max={FIGURE_BOUNDS[absorption.kind][1]}
         step={byDecay ? 0.05 : 0.5}
         lit={litBand}
         onLight={onLightBand}

@@ -5,7 +5,7 @@ import { Icon } from "../marks/Icon";
 import type { PlanSave } from "../plan/usePlanSave";
 import { Button } from "../ui/Button";
 import { NineBandRow } from "../ui/NineBandRow";
-import { Sheet } from "../ui/Sheet";
+import { FoldedSheet } from "../ui/FoldedSheet";
 import { TextField } from "../ui/TextField";
 import { VisuallyHidden } from "../ui/VisuallyHidden";
 import { NameField } from "./NameField";
@@ -37,7 +37,7 @@ export function ObjectsSheet({ room: { space }, absorption, save, onRemove }: Pr
   }
 
   return (
-    <Sheet heading="People and things" says="Each takes an area of its own, in square metres that swallow everything." className="mb-5">
+    <FoldedSheet heading="People and things" says="Each takes an area of its own, in square metres that swallow everything." className="mb-3 mid:mb-5">
       <ul>
         {objects.map((object, index) => (
           <li key={index} className="border-t border-rule py-3 first:border-t-0 first:pt-0">
@@ -75,6 +75,6 @@ export function ObjectsSheet({ room: { space }, absorption, save, onRemove }: Pr
           Add it
         </Button>
       </form>
-    </Sheet>
+    </FoldedSheet>
   );
 }

@@ -7,6 +7,7 @@ import type { PlanChange } from "../plan/save";
 import type { PlanSave } from "../plan/usePlanSave";
 import { Button } from "../ui/Button";
 import { Sheet } from "../ui/Sheet";
+import { FoldedSheet } from "../ui/FoldedSheet";
 import { Strip } from "../ui/Strip";
 import { Cautions } from "../walls/Cautions";
 import { AirPanel } from "./AirPanel";
@@ -148,11 +149,11 @@ export function RoomDetail({ projectId, room, save, finishes, may, litBand, onLi
       )}
       {room.building?.role === "studio" && <AirPanel space={space} />}
       {room.building?.role === "studio" && (
-        <Sheet heading="Before you seal it" className="mb-3 mid:mb-5">
+        <FoldedSheet heading="Before you seal it" className="mb-3 mid:mb-5">
           <div className="[&>ul]:mid:grid-cols-2 [&>ul]:wide:grid-cols-3">
             <Cautions cautions={sealCautions(plan, space)} />
           </div>
-        </Sheet>
+        </FoldedSheet>
       )}
       {may.edit && <RoomActs plan={plan} room={room} projectId={projectId} save={save} onOpen={onLightRoom} />}
     </>

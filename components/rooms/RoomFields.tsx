@@ -2,6 +2,7 @@
 
 import type { Plan } from "@/lib/noise/plan";
 import type { PlanChange } from "../plan/save";
+import { usePlannedSave } from "../plan/usePlannedSave";
 import type { PlanSave } from "../plan/usePlanSave";
 import { Disclosure } from "../ui/Disclosure";
 import { Button } from "../ui/Button";
@@ -9,7 +10,7 @@ import { QuantityField } from "../ui/QuantityField";
 import { Select } from "../ui/Select";
 import { DrawBox } from "./DrawBox";
 import { NameField } from "./NameField";
-import { boxVolume, volumeFollows, type Room, type Size } from "./room";
+import { boxVolume, roomOf, volumeFollows, type Room, type Size } from "./room";
 import { changeRoom, resize } from "./roomChanges";
 import { useQuantityWords } from "./useQuantityWords";
 
@@ -25,12 +26,18 @@ const sides = ["Inside width", "Inside depth", "Height"] as const;
 /** Name, size and volume of a room, and where it stands. */
 export function RoomFields({ plan, room, save }: Props) {
   const { space } = room;
-  const change = (field: string, changes: PlanChange[]) => void save.save(changes, `${space.id} ${field}`);
+  const planned = usePlannedSave(save);
+  /** Of the room that stands when its turn comes: width and depth, typed one after the other, are of one box. */
+  const change = (field: string, changes: (now: Room, plan: Plan) => PlanChange[]) =>
+    void planned((now) => {
+      const standing = roomOf(now, space.id);
+      return standing ? changes(standing, now) : [];
+    }, `${space.id} ${field}`);
   const error = (field: string) => save.errorOf(`${space.id} ${field}`);
   const { box } = space;
   return (
     <div className="grid gap-5">
-      <NameField label="Name" value={space.name} error={error("name")} onCommit={(name) => change("name", [changeRoom(space, { name })])} />
+      <NameField label="Name" value={space.name} error={error("name")} onCommit={(name) => change("name", (now) => [changeRoom(now.space, { name })])} />
       {box ? (
         <div className="grid grid-cols-2 gap-4 mid:grid-cols-4">
           {sides.map((label, side) => (
@@ -43,15 +50,15 @@ export function RoomFields({ plan, room, save }: Props) {
               max={side === 2 ? 100 : 1000}
               value={box.size[side]}
               error={error(label)}
-              onCommit={(value) => value !== null && change(label, resize(room, withSide(box.size, side, value)))}
+              onCommit={(value) => value !== null && change(label, (now) => resize(now, withSide((now.space.box ?? box).size, side, value)))}
             />
           ))}
-          <VolumeField room={room} error={error("volume")} onChange={(volume) => change("volume", [changeRoom(space, { volume })])} />
+          <VolumeField room={room} error={error("volume")} onChange={(volume) => change("volume", (now) => [changeRoom(now.space, { volume })])} />
         </div>
       ) : (
         <>
-          <DrawBox onDraw={(size) => change("box", resize(room, size, cornerOf(plan, room)))} error={error("box")} />
-          <VolumeField room={room} error={error("volume")} onChange={(volume) => change("volume", [changeRoom(space, { volume })])} />
+          <DrawBox onDraw={(size) => change("box", (now, standing) => resize(now, size, cornerOf(standing, now)))} error={error("box")} />
+          <VolumeField room={room} error={error("volume")} onChange={(volume) => change("volume", (now) => [changeRoom(now.space, { volume })])} />
         </>
       )}
       <Disclosure summary="Where it stands">
@@ -62,7 +69,7 @@ export function RoomFields({ plan, room, save }: Props) {
             value={space.buildingId}
             choices={plan.buildings.map(({ id, name }) => ({ value: id, label: name }))}
             error={error("building")}
-            onChange={(event) => change("building", [changeRoom(space, { buildingId: event.target.value })])}
+            onChange={({ target: { value } }) => change("building", (now) => [changeRoom(now.space, { buildingId: value })])}
           />
           {box &&
             (["West wall, east of nought", "South wall, north of nought", "Floor over ground"] as const).map((label, axis) => (
@@ -75,7 +82,7 @@ export function RoomFields({ plan, room, save }: Props) {
                 max={axis === 2 ? 100 : 1000}
                 value={box.at[axis]}
                 error={error(label)}
-                onCommit={(value) => value !== null && change(label, [changeRoom(space, { box: { ...box, at: withSide(box.at, axis, value) } })])}
+                onCommit={(value) => value !== null && change(label, (now) => moveTo(now, axis, value))}
               />
             ))}
         </div>
@@ -85,6 +92,11 @@ export function RoomFields({ plan, room, save }: Props) {
 }
 
 const withSide = (all: readonly number[], at: number, value: number) => all.map((one, index) => (index === at ? value : one)) as Size; // three stay three
+
+function moveTo({ space }: Room, axis: number, value: number): PlanChange[] {
+  const { box } = space;
+  return box ? [changeRoom(space, { box: { ...box, at: withSide(box.at, axis, value) } })] : [];
+}
 
 /** South-west corner of the building and its lowest floor; nought where it is not drawn. */
 function cornerOf({ buildings }: Plan, { building }: Room): Size {

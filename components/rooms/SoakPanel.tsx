@@ -1,7 +1,7 @@
 import type { SpaceVerdict } from "@/lib/noise/verdict";
 import { OCTAVE_BANDS } from "../../lib/noise/bands";
 import { bandWords, formatNumber, percent } from "../format";
-import { Sheet } from "../ui/Sheet";
+import { FoldedSheet } from "../ui/FoldedSheet";
 import { Select } from "../ui/Select";
 import { Cell, HeadCell, Row, RowHead, Table } from "../ui/Table";
 import { withMark } from "../ui/figures";
@@ -24,7 +24,7 @@ interface Props {
 export function SoakPanel({ room, judged, litBand, onLight }: Props) {
   const soakers = soakersOf(room, judged);
   return (
-    <Sheet
+    <FoldedSheet
       heading="Who soaks it up"
       says={soakers && soakers.length > 0 ? "Shares of each band; they add to 100 %." : undefined}
       beside={<BandChoice litBand={litBand} onLight={onLight} />}
@@ -40,7 +40,7 @@ export function SoakPanel({ room, judged, litBand, onLight }: Props) {
           <Shares soakers={soakers} litBand={litBand} />
         </>
       )}
-    </Sheet>
+    </FoldedSheet>
   );
 }
 

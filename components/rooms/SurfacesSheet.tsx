@@ -10,7 +10,7 @@ import { Button } from "../ui/Button";
 import { NineBandRow } from "../ui/NineBandRow";
 import { QuantityField } from "../ui/QuantityField";
 import { Select } from "../ui/Select";
-import { Sheet } from "../ui/Sheet";
+import { FoldedSheet } from "../ui/FoldedSheet";
 import { VisuallyHidden } from "../ui/VisuallyHidden";
 import { AddSurface } from "./AddSurface";
 import { boxAreas } from "./finishSets";
@@ -34,7 +34,7 @@ export function SurfacesSheet({ room, finishes, save, onRemove, onSurfaces }: Pr
   const { space, surfaces } = room;
   const counted = space.absorption.kind === "surfaces";
   return (
-    <Sheet heading="Surfaces" says={counted ? "A change of any of them weighs at once." : undefined} className="mb-5">
+    <FoldedSheet heading="Surfaces" says={counted ? "A change of any of them weighs at once." : undefined} className="mb-3 mid:mb-5">
       {!counted && (
         <div className="mb-4 flex flex-wrap items-center gap-x-4 gap-y-2 rounded-control border border-dashed border-edge p-3">
           <p className="min-w-0 flex-[1_1_14rem] text-ink2">
@@ -53,7 +53,7 @@ export function SurfacesSheet({ room, finishes, save, onRemove, onSurfaces }: Pr
       </ul>
       <Coverage room={room} />
       <AddSurface room={room} finishes={finishes} save={save} />
-    </Sheet>
+    </FoldedSheet>
   );
 }
 

@@ -42,10 +42,17 @@ export function resize(room: Room, size: Size, at = room.space.box?.at ?? ([0, 0
 
 const FIGURES = 4;
 
-/** Nine figures to start from: those the room has now, so that nothing moves by the change itself. */
+/** What own figures may be: seconds, and m². */
+export const FIGURE_BOUNDS = { decay: [0.02, 30], area: [0.01, 10_000] } as const;
+
+/**
+ * Nine figures to start from: those the room has now, so that nothing moves by the change itself. An empty room rings
+ * for longer than anybody could mean; such a figure is left open.
+ */
 export function ownFigures(kind: "decay" | "area", judged: SpaceVerdict | undefined): Space["absorption"] {
+  const [least, most] = FIGURE_BOUNDS[kind];
   const figures = (values: readonly unknown[] = new Array(9).fill(null)) =>
-    values.map((value) => (typeof value === "number" ? Number(value.toPrecision(FIGURES)) : null));
+    values.map((value) => (typeof value === "number" && value >= least && value <= most ? Number(value.toPrecision(FIGURES)) : null));
   return kind === "decay" ? { kind, seconds: figures(judged?.decay) } : { kind, area: figures(judged?.absorption) };
 }
 

@@ -1,9 +1,10 @@
 "use client";
 
 import type { DuctPiece } from "@/lib/noise/ducts/run";
-import type { Outlet } from "@/lib/noise/plan";
+import type { Outlet, Plan } from "@/lib/noise/plan";
 import type { Source } from "@/lib/noise/sources";
 import { formatNumber, formatQuantity, listWords, withUnit } from "../format";
+import { RunFields } from "../plan/RunFields";
 import { SavedText } from "../ui/SavedText";
 import { Icon } from "../marks/Icon";
 import { Button } from "../ui/Button";
@@ -19,6 +20,11 @@ interface Props {
 }
 
 const OUTDOORS = "";
+
+/** Free cross-section of a duct 200 mm across, m²: what a new end has. Common practice, no source. */
+const USUAL_MOUTH = 0.0314;
+
+const runIn = ({ outlets }: Plan, id: string): DuctPiece[] => outlets.find((outlet) => outlet.id === id)?.run ?? [];
 
 /** Where a fan's sound comes out of its duct: a room, or the yard. */
 export function FanMouths({ desk, source }: Props) {
@@ -78,6 +84,14 @@ function Mouth({ desk, mouth }: { desk: SourceDesk; mouth: Outlet }) {
         <NumberField label="Louder towards the listener than on average" unit="dB" min={-30} max={20} value={mouth.directivity} error={error("directivity")} onCommit={(directivity) => directivity !== null && change({ directivity })} />
       )}
       <p className="text-second text-ink2">{runWords(mouth.run)}</p>
+      <RunFields
+        run={mouth.run}
+        from="the fan"
+        mouth={USUAL_MOUTH}
+        spot={`run/${mouth.id}`}
+        error={desk.save.errorOf(`run/${mouth.id}`)}
+        onChange={(change) => void desk.act((now) => [{ act: "change", part: "outlets", id: mouth.id, patch: { run: change(runIn(now, mouth.id)) } }], `run/${mouth.id}`)}
+      />
       <div>
         <Button icon={<Icon name="remove" size={18} />} onClick={() => void desk.act(() => [{ act: "remove", part: "outlets", id: mouth.id }], mouth.id, undo)}>
           Remove this mouth

@@ -1,6 +1,7 @@
 "use client";
 
 import { useState } from "react";
+import { keepTyped } from "../plan/keepTyped";
 import { QuantityField } from "../ui/QuantityField";
 
 type Position = [number, number, number];
@@ -22,7 +23,7 @@ export function PositionFields({ position, errorOf, onCommit }: Props) {
   const [draft, setDraft] = useState<(number | null)[]>(position ?? [null, null, null]);
   if (JSON.stringify(stored) !== JSON.stringify(position)) {
     setStored(position);
-    setDraft(position ?? draft);
+    setDraft(position ? keepTyped(draft, position, stored) : draft);
   }
   function commit(axis: number, value: number | null) {
     const next = draft.map((one, i) => (i === axis ? value : one));

@@ -112,12 +112,12 @@ function PlayingRow({ desk, situation, source }: { desk: SourceDesk; situation: 
     );
   return (
     <li className="flex min-h-12 flex-wrap items-center gap-x-4 gap-y-2 border-t border-rule py-2">
-      <Checkbox label={<span className="break-words">{source.name}</span>} checked={share !== null} onChange={(event) => set(event.target.checked ? 1 : null)} className="min-w-0 flex-[1_1_12rem]" />
+      <Checkbox label={<span className="break-words">{source.name}</span>} checked={share !== null} onChange={(event) => set(event.target.checked ? 1 : null)} className="min-w-0 flex-[1_1_9rem]" />
       <span className="text-second text-ink2 max-mid:order-last max-mid:basis-full max-mid:pl-8">{share === null ? "off" : shareWords(share)}</span>
       {share !== null && (
         <NumberField
           label={<span className="sr-only">Share of the time, {source.name}</span>}
-          className="w-32 flex-none"
+          className="w-28 flex-none"
           unit="%"
           min={0.1}
           max={100}

@@ -3,7 +3,7 @@
 import type { Source } from "@/lib/noise/sources";
 import { Icon } from "../marks/Icon";
 import { Button } from "../ui/Button";
-import { Sheet } from "../ui/Sheet";
+import { FoldedSheet } from "../ui/FoldedSheet";
 import { ArrivingLevels } from "./ArrivingLevels";
 import { BareEars } from "./BareEars";
 import { placementOf, type SourceDesk } from "./desk";
@@ -46,18 +46,18 @@ export function SourceEditor({ desk, source, onRemove }: Props) {
       </div>
       {!arriving && (
         <div className="mb-5 rounded-sheet bg-sheet desk:grid desk:grid-cols-[minmax(0,1.35fr)_minmax(0,1fr)]">
-          <Sheet heading="Library" says="± is the doubt at its loudest band." className="desk:border-r desk:border-rule">
+          <FoldedSheet heading="Library" says="± is the doubt at its loudest band." className="desk:border-r desk:border-rule">
             <SourceLibrary desk={desk} source={source} />
-          </Sheet>
+          </FoldedSheet>
           {placement === "fan" && (
-            <Sheet heading="Mouths of its duct" className="border-t border-rule desk:border-t-0">
+            <FoldedSheet heading="Mouths of its duct" className="border-t border-rule desk:border-t-0">
               <FanMouths desk={desk} source={source} />
-            </Sheet>
+            </FoldedSheet>
           )}
           {!desk.locked && placement !== "fan" && (
-            <Sheet heading="Your own measurement" says="Levels beside it become its power. Nothing is used until you say so." className="border-t border-rule desk:border-t-0">
+            <FoldedSheet heading="Your own measurement" says="Levels beside it become its power. Nothing is used until you say so." className="border-t border-rule desk:border-t-0">
               <OwnMeasurement desk={desk} source={source} />
-            </Sheet>
+            </FoldedSheet>
           )}
         </div>
       )}

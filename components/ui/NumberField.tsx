@@ -5,6 +5,7 @@ import { useId, useState, type KeyboardEvent, type ReactNode } from "react";
 import { formatQuantity, parseNumber, withUnit } from "../format";
 import { useFigures, withMark } from "./figures";
 import { borderOf, describe, FieldFrame, inputClasses } from "./FieldFrame";
+import { useTyped } from "./useTyped";
 
 interface Props {
   label: ReactNode;
@@ -26,7 +27,6 @@ interface Props {
   name?: string;
   className?: string;
 }
-
 
 /** 0.1 + 0.2 is 0.3 here: a step never adds decimals of its own. */
 function addStep(value: number, change: number, step: number): number {
@@ -58,40 +58,31 @@ export function NumberField(props: Props) {
   const { mark } = useFigures();
   const show = (figure: number | null | undefined) =>
     figure === null || figure === undefined ? "" : withMark(formatQuantity(figure), mark);
-  const [stored, setStored] = useState(value);
-  const [text, setText] = useState(show(value));
+  const typed = useTyped(value, show);
+  const { text } = typed;
   const [complaint, setComplaint] = useState<string>();
   const [stepped, setStepped] = useState(false);
-  /** Handed over and not yet come back as `value`; leaving the field hands nothing over twice. */
-  const [sent, setSent] = useState<number | null>();
-  if (!Object.is(stored, value)) {
-    setStored(value);
-    setSent(undefined);
-    if ((parseNumber(text) ?? null) !== (value ?? null)) setText(show(value));
-    setComplaint(doubt(value ?? null));
-  }
+  if (typed.came) setComplaint(doubt(value ?? null));
 
   function doubt(figure: number | null): string | undefined {
     return figure === null ? undefined : caution?.(figure);
   }
 
-  function commit(typed: string) {
+  function commit() {
     setStepped(false);
-    const refusal = refuse(typed, props);
-    const figure = parseNumber(typed) ?? null;
+    const refusal = refuse(text, props);
+    const figure = parseNumber(text) ?? null;
     setComplaint(refusal ?? doubt(figure));
-    if (refusal !== undefined || figure === (value ?? null) || figure === sent) return;
-    setSent(figure);
-    onCommit(figure);
+    if (refusal === undefined && typed.hand(figure)) onCommit(figure);
   }
 
   function press(event: KeyboardEvent<HTMLInputElement>) {
-    if (event.key === "Enter") return commit(text);
+    if (event.key === "Enter") return commit();
     const direction = event.key === "ArrowUp" ? 1 : event.key === "ArrowDown" ? -1 : 0;
     if (direction === 0) return;
     event.preventDefault();
     const from = parseNumber(text) ?? value ?? 0;
-    setText(show(clamp(addStep(from, direction * step * (event.shiftKey ? 10 : 1), step), props)));
+    typed.type(show(clamp(addStep(from, direction * step * (event.shiftKey ? 10 : 1), step), props)));
     setStepped(true);
   }
 
@@ -106,11 +97,11 @@ export function NumberField(props: Props) {
           inputMode="decimal"
           autoComplete="off"
           value={text}
-          onChange={(event) => setText(event.target.value)}
-          onFocus={() => setSent(undefined)}
+          onChange={(event) => typed.type(event.target.value)}
+          onFocus={typed.visit}
           onKeyDown={press}
-          onKeyUp={() => stepped && commit(text)}
-          onBlur={() => commit(text)}
+          onKeyUp={() => stepped && commit()}
+          onBlur={commit}
           aria-invalid={message ? true : undefined}
           aria-describedby={[unit && `${id}-unit`, describe(id, hint, message)].filter(Boolean).join(" ") || undefined}
           className={clsx(inputClasses, borderOf(message), unit && "pr-16")}

@@ -3,6 +3,7 @@
 import clsx from "clsx";
 import { useId, useState, type KeyboardEvent, type ReactNode } from "react";
 import { borderOf, describe, FieldFrame, inputClasses } from "./FieldFrame";
+import { useTyped } from "./useTyped";
 
 interface Props {
   label: ReactNode;
@@ -22,25 +23,16 @@ interface Props {
 /** Words that are saved when the field is left or on Enter. What the server refused stays as it was typed. */
 export function SavedText({ label, value, type = "text", lines = 1, most, needed, hint, error, onCommit, className }: Props) {
   const id = useId();
-  const [stored, setStored] = useState(value);
-  const [text, setText] = useState(value);
+  const typed = useTyped(value, (words) => words);
+  const { text } = typed;
   const [complaint, setComplaint] = useState<string>();
-  /** Handed over and not yet come back as `value`. */
-  const [sent, setSent] = useState<string>();
-  if (stored !== value) {
-    setStored(value);
-    setText(value);
-    setSent(undefined);
-    setComplaint(undefined);
-  }
+  if (typed.came) setComplaint(undefined);
 
   function commit() {
     const words = text.trim();
     const empty = needed && words === "";
     setComplaint(empty ? "This cannot be empty." : undefined);
-    if (empty || words === value || words === sent) return;
-    setSent(words);
-    onCommit(words);
+    if (!empty && typed.hand(words)) onCommit(words);
   }
 
   function press(event: KeyboardEvent) {
@@ -52,7 +44,7 @@ export function SavedText({ label, value, type = "text", lines = 1, most, needed
     id,
     value: text,
     maxLength: most,
-    onFocus: () => setSent(undefined),
+    onFocus: typed.visit,
     onBlur: commit,
     onKeyDown: press,
     "aria-invalid": message ? true : undefined,
@@ -61,9 +53,9 @@ export function SavedText({ label, value, type = "text", lines = 1, most, needed
   return (
     <FieldFrame id={id} label={label} hint={hint} error={message} className={className}>
       {lines > 1 ? (
-        <textarea {...shared} rows={lines} onChange={(event) => setText(event.target.value)} className={clsx(inputClasses, borderOf(message), "resize-y py-2")} />
+        <textarea {...shared} rows={lines} onChange={(event) => typed.type(event.target.value)} className={clsx(inputClasses, borderOf(message), "resize-y py-2")} />
       ) : (
-        <input {...shared} type={type} autoComplete="off" onChange={(event) => setText(event.target.value)} className={clsx(inputClasses, borderOf(message))} />
+        <input {...shared} type={type} autoComplete="off" onChange={(event) => typed.type(event.target.value)} className={clsx(inputClasses, borderOf(message))} />
       )}
     </FieldFrame>
   );

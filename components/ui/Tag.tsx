@@ -12,12 +12,12 @@ export function Tag({ icon, dashed, children }: Props) {
   return (
     <span
       className={clsx(
-        "inline-flex items-center gap-1.5 rounded-tag border-[1.5px] border-edge px-2 py-0.5 text-least font-semibold text-ink2",
+        "inline-flex max-w-full items-center gap-1.5 rounded-tag border-[1.5px] border-edge px-2 py-0.5 text-least font-semibold text-ink2",
         dashed && "border-dashed",
       )}
     >
       {icon}
-      <span>{children}</span>
+      <span className="min-w-0 wrap-anywhere">{children}</span>
     </span>
   );
 }

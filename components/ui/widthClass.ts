@@ -11,7 +11,7 @@ export function widthClassOf(viewport: number): WidthClass {
   return WIDTH_CLASSES.findLast((widthClass) => viewport >= widthSteps[widthClass]) ?? 390;
 }
 
-/** Anything but one of ours is the default. */
-export function readWidthClass(cookie: string | undefined): WidthClass {
-  return WIDTH_CLASSES.find((widthClass) => `${widthClass}` === cookie) ?? 1440;
+/** Anything but one of ours is a first visit: drawn for a phone where the browser says that it runs on one. */
+export function readWidthClass(cookie: string | undefined, userAgent = ""): WidthClass {
+  return WIDTH_CLASSES.find((widthClass) => `${widthClass}` === cookie) ?? (/\bMobi/.test(userAgent) ? 390 : 1440);
 }

@@ -25,7 +25,8 @@ interface Props {
   kinds: readonly KindChoice[];
   error?: string;
   saving: boolean;
-  onAdd: (draft: Draft) => Promise<boolean>;
+  /** The boundary it was put in; undefined where it was refused. */
+  onAdd: (draft: Draft) => Promise<string | undefined>;
 }
 
 const NEW = "new";
@@ -64,7 +65,9 @@ export function AddElement({ plan, kinds, error, saving, onAdd }: Props) {
     const missing = draft.name.trim() === "" ? "Give it a name first." : area === null ? "Type its area first." : undefined;
     setComplaint(missing);
     if (missing || saving) return;
-    if (await onAdd(draft)) begin({ name: "", catalogueKey: null });
+    const pathId = await onAdd(draft);
+    // What stands beside it is in the same boundary, not in a second one of the same name.
+    if (pathId) begin({ name: "", catalogueKey: null, pathId, pathName: "" });
   }
 
   if (plan.spaces.length === 0) return <p className="text-second text-ink2">A wall stands between a room and something else. Add a room first, on the page of the rooms.</p>;

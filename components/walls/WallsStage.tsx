@@ -1,7 +1,7 @@
 "use client";
 
 import { useRouter } from "next/navigation";
-import { useRef } from "react";
+import { useRef, useState } from "react";
 import type { ConstructionSheet } from "../../lib/noise/sheet";
 import { budgetAddress, elementAddress, roomsAddress, wallsAddress } from "../addresses";
 import { Icon } from "../marks/Icon";
@@ -41,13 +41,19 @@ export function WallsStage({ projectId, may, sheets, kinds }: WallsStageProps) {
   const weighing = useLasting(saving, 400);
   const lead = leadOf(answer);
   const adding = useRef<HTMLDivElement>(null);
+  /** Unfolded in a yard without walls, and left as it is when the first one is there. */
+  const [unfolded] = useState(plan.elements.length === 0);
   const pathOf = (id: string) => plan.paths.find((path) => path.id === id);
 
-  async function add(draft: Draft): Promise<boolean> {
-    const saved = await planned((now) => additionOf(now, draft), "walls/add");
-    if (saved?.kind !== "saved") return false;
+  async function add(draft: Draft): Promise<string | undefined> {
+    let known = new Set<string>();
+    const saved = await planned((now) => {
+      known = new Set(now.elements.map(({ id }) => id));
+      return additionOf(now, draft);
+    }, "walls/add");
+    if (saved?.kind !== "saved") return undefined;
     router.refresh(); // a construction that was copied needs its sheet
-    return true;
+    return saved.answer.plan.elements.find(({ id }) => !known.has(id))?.pathId;
   }
 
   return (
@@ -65,7 +71,7 @@ export function WallsStage({ projectId, may, sheets, kinds }: WallsStageProps) {
               </LinkButton>
             </Sheet>
           ) : (
-            <Disclosure open={plan.elements.length === 0} summary={<span className="flex items-center gap-2"><Icon name="plus" size={18} />Add a wall or an opening</span>}>
+            <Disclosure open={unfolded} summary={<span className="flex items-center gap-2"><Icon name="plus" size={18} />Add a wall or an opening</span>}>
               <div className="pt-2 text-ink">
                 <AddElement plan={plan} kinds={kinds} saving={saving} error={save.errorOf("walls/add")} onAdd={add} />
               </div>

@@ -1,4 +1,5 @@
 import clsx from "clsx";
+import type { ReactNode } from "react";
 import { formatNumber, percent, withUnit } from "../format";
 import { HatchSwatch } from "../marks/HatchSwatch";
 import type { Figures } from "../ui/figures";
@@ -28,21 +29,12 @@ export function WaysInto({ heading, ways, litId, figures, onLight }: Props) {
       <ul>
         {ways.slice(0, SHOWN).map((way) => (
           <li key={way.id} className="border-t border-rule first:border-t-0">
-            <button
-              type="button"
-              aria-pressed={way.id === litId}
-              disabled={way.partId === null}
-              onClick={() => onLight(way)}
-              className={clsx(
-                "-mx-3 grid w-[calc(100%+24px)] min-h-10 grid-cols-[20px_minmax(0,1fr)_auto_52px] items-center gap-x-3 px-3 py-1.5 text-left text-table",
-                way.id === litId ? "bg-lampwash" : "enabled:hover:bg-well disabled:cursor-default",
-              )}
-            >
+            <Line way={way} lit={way.id === litId} onLight={onLight}>
               <HatchSwatch kind={way.kind} lit={way.id === litId} />
               <span className="min-w-0 break-words font-semibold">{way.name}</span>
               <span className="text-ink2">{long(way.distance)}</span>
               <span className="text-right font-semibold">{percent(way.share)}</span>
-            </button>
+            </Line>
           </li>
         ))}
       </ul>
@@ -50,5 +42,17 @@ export function WaysInto({ heading, ways, litId, figures, onLight }: Props) {
         The sheaf is as wide as everything that arrives, and a ribbon’s width is its share of the energy: half a ribbon is half of its part, not half of the noise.
       </p>
     </section>
+  );
+}
+
+const line = "-mx-3 grid w-[calc(100%+24px)] min-h-10 grid-cols-[20px_minmax(0,1fr)_auto_52px] items-center gap-x-3 px-3 py-1.5 text-left text-table";
+
+/** A way by a part of the yard lights that part; one that has no part to light is read. */
+function Line({ way, lit, onLight, children }: { way: Way; lit: boolean; onLight: Props["onLight"]; children: ReactNode }) {
+  if (way.partId === null) return <div className={line}>{children}</div>;
+  return (
+    <button type="button" aria-pressed={lit} onClick={() => onLight(way)} className={clsx(line, lit ? "bg-lampwash" : "hover:bg-well")}>
+      {children}
+    </button>
   );
 }

@@ -1,10 +1,15 @@
+// Longer than most: the table of rights stands whole beside the questions asked of it.
+import { randomUUID } from "node:crypto";
 import { beforeAll, describe, expect, it } from "vitest";
 import { acts } from "../../app/_server/access";
 import { ask, buildSession } from "../build";
-import { ACTORS, buildStage, cookieFor, type Actor, type Stage } from "./actors";
+import { ACTORS, BEARERS, buildStage, cookieFor, tokenOf, type Actor, type Stage } from "./actors";
 import { findRoutes, type ServedRoute } from "./routes";
 
-/** Statuses in the order of ACTORS: owner, acoustician, client, builder, other owner, other client, nobody. */
+/**
+ * Statuses of owner, acoustician, client, builder, other owner, other client, nobody. The bearers of a link's token, which
+ * nobody can issue yet, are told what nobody is told.
+ */
 type Statuses = readonly [number, number, number, number, number, number, number];
 
 interface Row {
@@ -15,6 +20,14 @@ interface Row {
   body?: (stage: Stage) => unknown;
   /** Ids nested below the project: each is asked again as a part of another project, which does not exist here. */
   foreign?: (stage: Stage) => Record<string, string>;
+  /** Bodies that name a part of another project, each refused with the status beside it. */
+  foreignBodies?: (stage: Stage) => { says: string; body: unknown; status: number }[];
+}
+
+/** The place of an actor's status in a row. */
+function placeOf(actor: Actor): number {
+  const told = BEARERS.some((bearer) => bearer === actor) ? "nobody" : actor;
+  return ACTORS.filter((one) => !BEARERS.some((bearer) => bearer === one)).indexOf(told);
 }
 
 const changing: Statuses = [200, 200, 403, 403, 404, 404, 401];
@@ -25,13 +38,33 @@ const fence = ({ plan }: Stage) => {
   return values;
 };
 
+/** A change that is in order, so that one beside it that is not takes it along. */
+const ownChange = ({ idOf }: Stage) => ({ act: "change", part: "elements", id: idOf("yard-door"), patch: { area: 1.5 } });
+
+/** Every way in which one of several changes may name what belongs to another project. */
+function foreignChanges({ plan, idOf, sibling }: Stage): { says: string; change: object; status: number }[] {
+  const { id: _, ...element } = plan.elements[0]!;
+  const { id: __, ...receiver } = plan.receivers.find(({ spaceId }) => spaceId)!;
+  const theirs = { pathId: sibling.plan.paths[0]!.id, constructionId: sibling.plan.constructions[0]!.id, spaceId: sibling.plan.receivers.find(({ spaceId }) => spaceId)!.spaceId };
+  return [
+    { says: "changed", status: 404, change: { act: "change", part: "elements", id: sibling.idOf("yard-door"), patch: { area: 2 } } },
+    { says: "removed", status: 404, change: { act: "remove", part: "elements", id: sibling.idOf("yard-door") } },
+    { says: "added to a path", status: 422, change: { act: "add", part: "elements", values: { ...element, pathId: theirs.pathId } } },
+    { says: "added with a construction", status: 422, change: { act: "add", part: "elements", values: { ...element, constructionId: theirs.constructionId } } },
+    { says: "added in a room", status: 422, change: { act: "add", part: "receivers", values: { ...receiver, spaceId: theirs.spaceId } } },
+    { says: "moved to a path", status: 422, change: { act: "change", part: "elements", id: idOf("yard-door"), patch: { pathId: theirs.pathId } } },
+    { says: "given a construction", status: 422, change: { act: "change", part: "elements", id: idOf("yard-door"), patch: { constructionId: theirs.constructionId } } },
+  ];
+}
+
 const table: Record<string, Row> = {
   "GET /api/health": { act: null, statuses: [200, 200, 200, 200, 200, 200, 200] },
   "POST /api/csp": { act: null, statuses: [204, 204, 204, 204, 204, 204, 204], body: () => ({ "csp-report": {} }) },
   "POST /api/session": {
     act: null,
     statuses: [401, 401, 401, 401, 401, 401, 401],
-    body: () => ({ email: "nobody@stillyard.example", password: "a password that nobody has" }),
+    // Another account each time: a sixth wrong guess at one would have to wait.
+    body: () => ({ email: `${randomUUID()}@stillyard.example`, password: "a password that nobody has" }),
   },
   "DELETE /api/session": { act: null, statuses: [204, 204, 204, 204, 204, 204, 204] },
   "POST /api/sign-up": {
@@ -98,6 +131,7 @@ const table: Record<string, Row> = {
     statuses: changing,
     params: project,
     body: (stage) => ({ changes: [{ act: "add", part: "fences", values: fence(stage) }] }),
+    foreignBodies: (stage) => foreignChanges(stage).map(({ says, change, status }) => ({ says, status, body: { changes: [ownChange(stage), change] } })),
   },
   "PATCH /api/projects/[projectId]/[part]/[partId]": {
     act: "edit plan",
@@ -130,18 +164,20 @@ async function revision(): Promise<number> {
 }
 
 /** Asks as an actor. Whoever signs out does so in a session of their own. */
-async function askAs(actor: Actor, name: string, changes: { params?: Record<string, string>; headers?: Record<string, string> } = {}) {
+async function askAs(actor: Actor, name: string, changes: { params?: Record<string, string>; headers?: Record<string, string>; body?: unknown } = {}) {
   const { method, handler } = routes.find((one) => one.name === name)!;
   const { params, body } = table[name]!;
-  const leaves = name === "DELETE /api/session" && actor !== "nobody";
-  const cookie = leaves ? (await buildSession(stage.users[actor])).cookie : cookieFor(stage, actor);
+  const token = tokenOf(actor);
+  const user = Object.entries(stage.users).find(([known]) => known === actor)?.[1];
+  const cookie = user && name === "DELETE /api/session" ? (await buildSession(user)).cookie : cookieFor(stage, actor);
   return ask(handler, {
     method,
     cookie,
     params: { ...params?.(stage), ...changes.params },
-    body: method === "GET" || method === "DELETE" ? undefined : body?.(stage),
+    body: method === "GET" || method === "DELETE" ? undefined : (changes.body ?? body?.(stage)),
     revision: method === "GET" ? undefined : await revision(),
-    headers: changes.headers,
+    headers: { ...token.headers, ...changes.headers },
+    query: token.query,
   });
 }
 
@@ -157,7 +193,7 @@ describe("rights", () => {
   });
 
   const cells = Object.entries(table).flatMap(([name, { statuses }]) =>
-    ACTORS.map((actor, place) => ({ name, actor, status: statuses[place]! })),
+    ACTORS.map((actor) => ({ name, actor, status: statuses[placeOf(actor)]! })),
   );
   // The owner comes last, so that what others must not remove is still there to be asked for.
   const ordered = cells.toSorted((one, two) => ACTORS.indexOf(two.actor) - ACTORS.indexOf(one.actor));
@@ -173,12 +209,12 @@ describe("rights", () => {
     expect((await askAs("acoustician", name, { params: { partId: stage.plan.surfaces[1]!.id } })).status).toBe(200);
   });
 
-  it.each([["owner", 200], ["acoustician", 200], ["client", 403], ["builder", 403], ["other owner", 404], ["other client", 404], ["nobody", 401]] as const)(
+  it.each([["owner", 200], ["acoustician", 200], ["client", 403], ["builder", 403], ["other owner", 404], ["other client", 404], ["link in the address", 401], ["link in a header", 401], ["nobody", 401]] as const)(
     "a limit changed by %s is %i",
     async (actor, status) => {
       const params = { part: "criteria", partId: stage.plan.criteria[0]!.id };
       const { handler } = routes.find((one) => one.name === "PATCH /api/projects/[projectId]/[part]/[partId]")!;
-      const asked = { method: "PATCH", cookie: cookieFor(stage, actor), params: { projectId: stage.project.id, ...params }, body: { place: `in bed, asked by ${actor}` }, revision: await revision() };
+      const asked = { method: "PATCH", cookie: cookieFor(stage, actor), params: { projectId: stage.project.id, ...params }, body: { place: `in bed, asked by ${actor}` }, revision: await revision(), ...tokenOf(actor) };
       expect((await ask(handler, asked)).status).toBe(status);
     },
   );
@@ -186,6 +222,13 @@ describe("rights", () => {
   const nested = Object.entries(table).flatMap(([name, { foreign }]) => (foreign ? [{ name, foreign }] : []));
   it.each(nested)("$name: the right child under a foreign parent does not exist", async ({ name, foreign }) => {
     expect((await askAs("owner", name, { params: foreign(stage) })).status).toBe(404);
+  });
+
+  const withBodies = Object.entries(table).flatMap(([name, { foreignBodies }]) => (foreignBodies ? [{ name, foreignBodies }] : []));
+  it.each(withBodies)("$name: a body that names a part of another project is refused, and nothing is kept", async ({ name, foreignBodies }) => {
+    const before = await revision();
+    for (const { says, body, status } of foreignBodies(stage)) expect((await askAs("owner", name, { body })).status, says).toBe(status);
+    expect(await revision()).toBe(before);
   });
 
   const onProjects = Object.keys(table).filter((name) => table[name]!.params && name.includes("[projectId]"));

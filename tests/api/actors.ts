@@ -1,16 +1,21 @@
 import type { Project, User } from "../../models/index";
 import { buildMember, buildParticipant, buildProject, buildTeam, buildUser, cookieOf, type BuiltProject } from "../build";
 
-/**
- * Who asks each route. Of the nine actors of the table of rights the two with a share link are left out: no link can be
- * made yet, so none can be live or revoked.
- */
-export const ACTORS = ["owner", "acoustician", "client", "builder", "other owner", "other client", "nobody"] as const;
+const SIGNED_IN = ["owner", "acoustician", "client", "builder", "other owner", "other client"] as const;
+type SignedIn = (typeof SIGNED_IN)[number];
+
+/** No link can be made yet, so its bearers hold a token that nobody issued, and get what nobody gets. */
+export const BEARERS = ["link in the address", "link in a header"] as const;
+
+/** The nine who ask each route. */
+export const ACTORS = [...SIGNED_IN, ...BEARERS, "nobody"] as const;
 export type Actor = (typeof ACTORS)[number];
 
+const isSignedIn = (actor: Actor): actor is SignedIn => SIGNED_IN.some((one) => one === actor);
+
 export interface Stage extends BuiltProject {
-  users: Record<Exclude<Actor, "nobody">, User>;
-  cookies: Record<Exclude<Actor, "nobody">, string>;
+  users: Record<SignedIn, User>;
+  cookies: Record<SignedIn, string>;
   /** Another project of the same team, and one of another team. */
   sibling: BuiltProject;
   foreign: BuiltProject;
@@ -38,4 +43,11 @@ export async function buildStage(): Promise<Stage> {
 
 const participant = (project: Project, role: "client" | "builder", name: string) => buildParticipant(project, role, name);
 
-export const cookieFor = ({ cookies }: Stage, actor: Actor) => (actor === "nobody" ? undefined : cookies[actor]);
+export const cookieFor = ({ cookies }: Stage, actor: Actor) => (isSignedIn(actor) ? cookies[actor] : undefined);
+
+/** What a bearer sends along, wherever a link's token might stand. */
+export function tokenOf(actor: Actor): { query?: string; headers?: Record<string, string> } {
+  const token = "x7Jt0c9wq3mXl2bV8dYk5uHn1eRzSaGf4oPiT6yLWcE";
+  if (actor === "link in the address") return { query: `?link=${token}&token=${token}` };
+  return actor === "link in a header" ? { headers: { authorization: `Bearer ${token}`, "x-stillyard-link": token, cookie: `stillyard-link=${token}` } } : {};
+}

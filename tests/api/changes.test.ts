@@ -99,9 +99,10 @@ describe("records of the library", () => {
     expect((await send([{ ...kit(), patch: { libraryKey: "no-such-kit" } }])).status).toBe(422);
   });
 
-  it("a limit of the library is copied whole with its clause", async () => {
+  it("a limit of the library is copied whole with its clause and the levels its edition gives", async () => {
     const { answer, status } = await send([{ act: "change", part: "criteria", id: stage.plan.criteria[0]!.id, patch: { libraryKey: "nc-20" } }]);
     expect(status, JSON.stringify(answer.error)).toBe(200);
-    expect(answer.plan.criteria[0]).toMatchObject({ metric: "NC", value: 20, edition: "ANSI/ASA S12.2-2019", levels: null });
+    expect(answer.plan.criteria[0]).toMatchObject({ metric: "NC", value: 20, edition: "ANSI/ASA S12.2-2019" });
+    expect(answer.plan.criteria[0]!.levels).toEqual([63, 50, 40, 33, 26, 22, 20, 17, 16]);
   });
 });

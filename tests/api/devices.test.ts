@@ -21,11 +21,11 @@ const end = (cookie: string, key: string) => ask(END, { method: "DELETE", cookie
 describe("where somebody is signed in", () => {
   it("lists each session once, this one first, by a key that opens nothing", async () => {
     const [mine, other] = [await buildSession(user), await buildSession(user)];
-    await Session.update({ device: "Mozilla/5.0 (X11; Linux x86_64) Chrome/140.0 Safari/537.36" }, { where: { idHash: other.idHash } });
+    await Session.update({ device: "Mozilla/5.0 (X11; Linux x86_64)" }, { where: { idHash: other.idHash } });
     const devices = await listOf(mine.cookie);
     expect(devices.map(({ current, device }) => ({ current, device }))).toEqual([
-      { current: true, device: "A browser we do not know" },
-      { current: false, device: "Chromium on Linux" },
+      { current: true, device: "A device we do not know" },
+      { current: false, device: "A computer" },
     ]);
     const text = JSON.stringify(devices);
     for (const { id, idHash } of [mine, other]) expect([text.includes(id), text.includes(idHash)]).toEqual([false, false]);
@@ -81,11 +81,12 @@ describe("ending them", () => {
 });
 
 it.each([
-  ["Mozilla/5.0 (X11; Linux x86_64; rv:140.0) Gecko/20100101 Firefox/140.0", "Firefox on Linux"],
-  ["Mozilla/5.0 (Macintosh; Intel Mac OS X 10_15_7) AppleWebKit/605.1.15 (KHTML, like Gecko) Version/18.5 Safari/605.1.15", "Safari on macOS"],
-  ["Mozilla/5.0 (iPhone; CPU iPhone OS 18_5 like Mac OS X) AppleWebKit/605.1.15 (KHTML, like Gecko) Version/18.5 Mobile/15E148 Safari/604.1", "Safari on iOS"],
-  ["Mozilla/5.0 (Linux; Android 15) AppleWebKit/537.36 (KHTML, like Gecko) Chrome/140.0.0.0 Mobile Safari/537.36", "Chromium on Android"],
-  ["Mozilla/5.0 (Windows NT 10.0; Win64; x64) AppleWebKit/537.36 (KHTML, like Gecko) Chrome/140.0.0.0 Safari/537.36 Edg/140.0.0.0", "Edge on Windows"],
-  ["<script>alert(1)</script>", "A browser we do not know"],
-  ["", "A browser we do not know"],
+  ["Mozilla/5.0 (X11; Linux x86_64; rv:140.0)", "A computer"],
+  ["Mozilla/5.0 (Macintosh; Intel)", "A computer"],
+  ["Mozilla/5.0 (Windows NT 10.0; Win64; x64)", "A computer"],
+  ["Mozilla/5.0 (iPhone; like Mac OS X) Mobile/15E148", "A phone"],
+  ["Mozilla/5.0 (Linux; Android 15) Mobile", "A phone"],
+  ["Mozilla/5.0 (Linux; Android 15)", "A tablet"],
+  ["<script>alert(1)</script>", "A device we do not know"],
+  ["", "A device we do not know"],
 ])("%s is called %s", (userAgent, words) => expect(deviceWords(userAgent)).toBe(words));

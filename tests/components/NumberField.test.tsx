@@ -102,6 +102,39 @@ describe("a number field", () => {
     expect(commit.mock.calls).toEqual([[40], [40]]);
   });
 
+  it("sends the old value typed back while the new one is on its way, and no answer overwrites what is being typed", async () => {
+    const commit = vi.fn();
+    const field = () => screen.getByRole<HTMLInputElement>("textbox", { name: "Gap" });
+    const { rerender } = render(<NumberField label="Gap" value={25} onCommit={commit} />);
+    const user = userEvent.setup();
+    await user.clear(field());
+    await user.type(field(), "40{Enter}");
+    await user.clear(field());
+    await user.type(field(), "25");
+    rerender(<NumberField label="Gap" value={40} onCommit={commit} />);
+    expect(field().value).toBe("25");
+    await user.tab();
+    expect(commit.mock.calls).toEqual([[40], [25]]);
+    rerender(<NumberField label="Gap" value={25} onCommit={commit} />);
+    expect(field().value).toBe("25");
+    rerender(<NumberField label="Gap" value={30} onCommit={commit} />);
+    expect(field().value).toBe("30");
+  });
+
+  it("takes both back and forth before the first answer", async () => {
+    const commit = vi.fn();
+    const field = () => screen.getByRole<HTMLInputElement>("textbox", { name: "Gap" });
+    const { rerender } = render(<NumberField label="Gap" value={25} onCommit={commit} />);
+    const user = userEvent.setup();
+    for (const figure of ["40", "25"]) {
+      await user.clear(field());
+      await user.type(field(), `${figure}{Enter}`);
+    }
+    expect(commit.mock.calls).toEqual([[40], [25]]);
+    rerender(<NumberField label="Gap" value={40} onCommit={commit} />);
+    expect(field().value).toBe("25");
+  });
+
   it("follows a value that another hand has changed", () => {
     const { rerender } = render(<NumberField label="Gap" value={25} onCommit={() => undefined} />);
     rerender(<NumberField label="Gap" value={1.8} onCommit={() => undefined} />);

@@ -244,6 +244,19 @@ describe("what can be done with a yard", () => {
     expect(third).not.toBe(first);
   });
 
+  it("a copy that is on its way already keeps its wish: the next try makes no second one", async () => {
+    const twin = { error: { message: "This very change is being saved already." } };
+    const asked = answerWith([503, { error: { message: "We cannot reach the yard's records just now." } }], [409, twin], [201, { id: "2", next: "/projects/2" }]);
+    show([yard({})]);
+    await choose("Lot 7", "Duplicate");
+    await screen.findByText("“Lot 7” was not copied");
+    await choose("Lot 7", "Duplicate");
+    await screen.findByText("This very change is being saved already.");
+    await choose("Lot 7", "Duplicate");
+    await screen.findByRole("link", { name: "Open the copy" });
+    expect(new Set(asked.map(({ headers }) => headers["Idempotency-Key"])).size).toBe(1);
+  });
+
   it("is archived, and restored from the strip that says so", async () => {
     const asked = answerWith(answered(5), answered(6));
     show([yard({}), yard({ id: "2", name: "Attic" })]);

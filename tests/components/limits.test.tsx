@@ -84,11 +84,12 @@ describe("the page of limits", () => {
   it("sends nine typed figures when a field is left", async () => {
     const sent = answerWith({ status: 200, body: buildAnswer({ revision: 8 }) });
     const user = show();
+    await user.click(screen.getByRole("radio", { name: "Nine bands" }));
     const field = within(screen.getByRole("group", { name: /The nine figures/ })).getAllByRole("textbox")[1]!;
     await user.clear(field);
     await user.type(field, "47{Enter}");
     expect(sent.mock.calls[0]![0]).toBe("/api/projects/p1/criteria/no9-limit");
-    expect(bodyOf(sent)).toMatchObject({ metric: "curve", levels: [49, 47, 38, 33, 27, 23, 20, 18, 16] });
+    expect(bodyOf(sent)).toMatchObject({ metric: "curve", levels: [49, 47, 38, 33, 27, 23, 20, 18, 16], above: null });
   });
 
   it("warns where the clause has the window shut and the drawing has it ajar, with the way to the window", () => {

@@ -4,7 +4,8 @@ import { FINISH_WORDS, finishSet, shellOf, wordOf } from "@/components/rooms/fin
 import { fitFragment, placeBalloons, storeyOf } from "@/components/rooms/planFragment";
 import { thingsIn } from "@/components/rooms/inside";
 import { roomOf, type Size } from "@/components/rooms/room";
-import { restoreRoom } from "@/components/rooms/roomChanges";
+import { ownFigures, restoreRoom } from "@/components/rooms/roomChanges";
+import { keepTyped } from "@/components/plan/keepTyped";
 import { sharesAt, soakersOf, sumAt } from "@/components/rooms/soak";
 import { finishRecords } from "@/lib/noise/library";
 import type { Surface } from "@/lib/noise/plan";
@@ -147,5 +148,17 @@ describe("the air of a shut room", () => {
     expect(carbonDioxide(60, { breath, flow: 0, volume: 45 })).toBeCloseTo(OUTDOORS + (1e6 * breath) / 45, 6);
     expect(carbonDioxide(100_000, { breath, flow: flowFor(1400, breath)!, volume: 45 })).toBeCloseTo(1400, 6);
     expect(carbonDioxide(30, { breath, flow: 140, volume: 45 })).toBeLessThan(carbonDioxide(30, { breath, flow: 0, volume: 45 }));
+  });
+});
+
+describe("figures of one's own", () => {
+  it("leave open what an empty room rings for, so that the change is not refused", () => {
+    const judged = { ...plumtreeAnswer.verdict.spaces["live-room"]!, decay: [5527, 392.5, 30, 2.5, 1.20004, 1, 0.5, 0.01, "unknown" as const] };
+    expect(ownFigures("decay", judged)).toEqual({ kind: "decay", seconds: [null, null, 30, 2.5, 1.2, 1, 0.5, null, null] });
+  });
+
+  it("of a place are kept where another one came back first", () => {
+    expect(keepTyped([1, 2, null], [1, 0, 5], [0, 0, 5])).toEqual([1, 2, 5]);
+    expect(keepTyped([null, null, 3], [1, 2, 3], null)).toEqual([1, 2, 3]);
   });
 });

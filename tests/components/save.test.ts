@@ -58,6 +58,26 @@ describe("saving a part", () => {
     expect(asked).toHaveLength(2);
   });
 
+  it("is sent again over a change of our own whose answer was lost", async () => {
+    serve({ status: 503, body: { error: { message: "Cannot save now." } } });
+    expect(await savePart({ ...door, patch: { params: { gapArea: 1 } } })).toMatchObject({ kind: "failed" });
+    const late = stale(5, "door");
+    const after = { area: 1.9, params: { gapArea: 1, seal: "none" } };
+    late.body.changedBy.parts = [{ ...touched("door"), after }];
+    const asked = serve(late, { status: 200, body: answer(6) });
+    expect(await savePart(door)).toEqual({ kind: "saved", answer: answer(6) });
+    expect(asked.map(({ revision }) => revision)).toEqual(['"4"', '"5"']);
+  });
+
+  it("is not sent again where somebody else changed it after the lost change", async () => {
+    serve({ status: 503, body: { error: { message: "Cannot save now." } } });
+    await savePart({ ...door, patch: { params: { gapArea: 1 } } });
+    const late = stale(6, "door");
+    late.body.changedBy.parts = [{ ...touched("door"), after: { area: 1.9, params: { gapArea: 1 } } }, { ...touched("door"), after: { area: 3, params: { gapArea: 2 } } }];
+    serve(late);
+    expect(await savePart(door)).toMatchObject({ kind: "stale" });
+  });
+
   it("a removal is never sent again, an addition is", async () => {
     serve(stale(7, "roof"));
     expect(await removePart(door)).toMatchObject({ kind: "stale" });

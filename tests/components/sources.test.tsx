@@ -46,6 +46,17 @@ describe("the stage of the sources", () => {
     await waitFor(() => expect(row(/^Drum kit/).textContent).toContain("your figure"));
   });
 
+  it("gives the mouth of a fan its silencer, in front of what stands", async () => {
+    const sent = answerWith({ status: 200, body: answerOf(plumtreePlan, 2) });
+    const user = showSources();
+    await user.click(row(/^Fan/));
+    await user.click(screen.getAllByRole("button", { name: "Add a silencer" })[0]!);
+    await waitFor(() => expect(sent).toHaveBeenCalledOnce());
+    expect(sent.mock.calls[0]![0]).toBe("/api/projects/p1/outlets/fan-grille");
+    const before = plumtreePlan.outlets.find(({ id }) => id === "fan-grille")!.run;
+    expect(bodyOf(sent)).toEqual({ run: [{ kind: "silencer", il: new Array(9).fill(null) }, ...before] });
+  });
+
   it("says of a band nobody knows that it can be over, but never under", () => {
     showSources({ plan: withKit({ power: [null, 111, 112, 105, 102, 98, 98, 100, 98] }) });
     expect(screen.getByText(/Not known: 31\.5.Hz\. An unknown band can be over, but never under\./)).toBeDefined();

@@ -1,3 +1,4 @@
+import { readdirSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 
 const address = process.env.STILLYARD_URL!;
@@ -11,11 +12,22 @@ const everywhere = {
   "strict-transport-security": "max-age=63072000; includeSubDomains",
 };
 
-const pages = ["/", "/sign-in", "/projects", "/nothing-here", "/projects/not-a-project"];
-const answers = ["/api/health", "/api/nothing-here", "/api/projects"];
+const pages = [
+  "/", "/sign-in", "/sign-up", "/check-mail", "/forgotten-password", "/new-password?token=x", "/email-check?token=x", "/email-move?token=x", "/email-undo?token=x", "/local-inbox",
+  "/account", "/projects", "/projects/new", "/nothing-here", "/projects/not-a-project",
+  ...["", "/yard", "/rooms", "/sources", "/walls", "/walls/not-a-wall", "/limits"].map((stage) => `/projects/00000000-0000-4000-8000-000000000000${stage}`),
+];
+const answers = ["/api/health", "/api/nothing-here", ...routes()];
+const methods = ["GET", "POST", "PATCH", "DELETE"];
 
-async function fetchHeaders(path: string) {
-  const answer = await fetch(address + path, { redirect: "manual" });
+/** Every route file's address, with a made-up name wherever one is asked for. */
+function routes(): string[] {
+  const files = readdirSync("app/api", { recursive: true, encoding: "utf8" }).filter((file) => /(^|\/)route\.ts$/.test(file));
+  return files.map((file) => `/api/${file.replace(/\/?route\.ts$/, "").replace(/\[[^\]]+\]/g, "made-up")}`).sort();
+}
+
+async function fetchHeaders(path: string, method = "GET") {
+  const answer = await fetch(address + path, { redirect: "manual", method });
   await answer.arrayBuffer();
   return Object.fromEntries(answer.headers);
 }
@@ -38,6 +50,15 @@ describe("headers of the served product", () => {
     const headers = await fetchHeaders(path);
     expect(headers["content-security-policy"]).toBe("default-src 'none'; frame-ancestors 'none'");
     expect(headers["cache-control"]).toContain("no-store");
+  });
+
+  it.each(answers)("%s refuses whoever comes from elsewhere, by any method, with every header", async (path) => {
+    for (const method of methods) {
+      const headers = await fetchHeaders(path, method);
+      expect([method, headers]).toMatchObject([method, everywhere]);
+      expect([method, headers["cache-control"]]).toEqual([method, expect.stringContaining("no-store")]);
+      expect([method, headers["content-security-policy"]]).toEqual([method, "default-src 'none'; frame-ancestors 'none'"]);
+    }
   });
 
   it("every script of a page carries the nonce of its policy", async () => {

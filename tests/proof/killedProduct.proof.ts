@@ -2,7 +2,7 @@ import { afterAll, beforeAll, expect, it } from "vitest";
 import { prepareServed, type Served } from "./ownServed";
 import { buildWriters, expectNothingLost, writeOn, type Sent, type Writer } from "../faults/killed/writers";
 
-const KILLS = 20;
+const KILLS = Number(process.env.STILLYARD_KILLS ?? 20);
 const WRITERS = 8;
 
 let product: Served;

@@ -6,28 +6,50 @@ import { join } from "node:path";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { freePort } from "../../scripts/port.mjs";
 
+/** Moments at which a start is killed. */
+const KILLS = Number(process.env.STILLYARD_KILLS ?? 20);
+
 let state: string;
 let port: number;
 
 beforeAll(async () => {
-  state = mkdtempSync(join(tmpdir(), "stillyard-start-"));
-  // The account of the database passes through.
-  chmodSync(state, 0o711);
+  state = freshState();
   port = await freePort();
 });
 
+function freshState(): string {
+  const folder = mkdtempSync(join(tmpdir(), "stillyard-start-"));
+  // The account of the database passes through.
+  chmodSync(folder, 0o711);
+  return folder;
+}
+
 afterAll(() => rmSync(state, { recursive: true, force: true }));
 
-function begin(): ChildProcess {
-  const environment: NodeJS.Dict<string> = { ...process.env, PORT: String(port), STILLYARD_STATE: state };
+interface Place {
+  state: string;
+  port: number;
+}
+
+function begin(place: Place = { state, port }): ChildProcess {
+  const environment: NodeJS.Dict<string> = { ...process.env, PORT: String(place.port), STILLYARD_STATE: place.state };
   for (const name of ["DATABASE_URL", "DATABASE_ADMIN_URL", "STILLYARD_ORIGIN", "NODE_ENV", "VITEST"]) delete environment[name];
-  return spawn(process.execPath, ["scripts/start.mjs"], { env: environment as NodeJS.ProcessEnv, stdio: "ignore" });
+  return spawn(process.execPath, ["scripts/start.mjs"], { env: environment as NodeJS.ProcessEnv, stdio: ["ignore", "ignore", "pipe"] });
+}
+
+/** What a start that ends by itself says, and how it ends. */
+async function endOf(child: ChildProcess): Promise<{ code: unknown; says: string }> {
+  let says = "";
+  child.stderr!.setEncoding("utf8").on("data", (piece: string) => (says += piece));
+  const [code] = await once(child, "close");
+  return { code, says };
 }
 
 /** Seconds until the product answers. */
-async function untilAnswered(child: ChildProcess): Promise<number> {
+async function untilAnswered(child: ChildProcess, at = port): Promise<number> {
+  child.stderr!.resume();
   const began = Date.now();
-  while (!(await answers())) {
+  while (!(await answers(at))) {
     if (child.exitCode !== null) throw new Error(`The start ended with ${child.exitCode}.`);
     if (Date.now() - began > 300_000) throw new Error("The product did not answer within 300 s.");
     await pause(50);
@@ -35,8 +57,8 @@ async function untilAnswered(child: ChildProcess): Promise<number> {
   return (Date.now() - began) / 1_000;
 }
 
-async function answers(): Promise<boolean> {
-  return fetch(`http://localhost:${port}/api/health`).then(
+async function answers(at = port): Promise<boolean> {
+  return fetch(`http://localhost:${at}/api/health`).then(
     (answer) => answer.ok,
     () => false,
   );
@@ -85,14 +107,40 @@ describe("start and end of the product", () => {
   it("a second start beside a running one leaves it alone and says so by its exit code", async () => {
     const first = begin();
     await untilAnswered(first);
-    expect(await once(begin(), "exit")).toEqual([1, null]);
+    const { code, says } = await endOf(begin());
+    expect({ code, says }).toEqual({ code: 1, says: expect.stringContaining(`already runs from this folder: http://localhost:${port}`) });
     expect(await answers()).toBe(true);
     await end(first, "SIGTERM");
   });
 
-  it("killed outright at 20 moments, the next start needs no repair", async () => {
+  it("two first starts at once in one folder: one serves, the other says where that one is", async () => {
+    const here = { state: freshState(), port: await freePort() };
+    const there = { ...here, port: await freePort() };
+    const children = [begin(here), begin(there)] as const;
+    const ends = children.map(endOf);
+    const [late] = await Promise.all([Promise.race(ends), Promise.any([untilAnswered(children[0], here.port), untilAnswered(children[1], there.port)])]);
+    const ports = [here.port, there.port];
+    const serving = (await answers(here.port)) ? 0 : 1;
+    expect(late).toEqual({ code: 1, says: expect.stringContaining(`already being started from this folder: http://localhost:${ports[serving]}`) });
+    expect(await answers(ports[1 - serving])).toBe(false);
+    expect(await end(children[serving]!, "SIGTERM")).toEqual([0, null]);
+    rmSync(here.state, { recursive: true, force: true });
+  });
+
+  it("two first starts at once, each with a state of its own: both serve, each from a database of its own", async () => {
+    const places = await Promise.all([0, 1].map(async () => ({ state: freshState(), port: await freePort() })));
+    const children = places.map((place) => begin(place));
+    await Promise.all(children.map((child, place) => untilAnswered(child, places[place]!.port)));
+    for (const place of places) expect(readdirSync(place.state)).toContain("postgres");
+    expect(await end(children[0]!, "SIGTERM")).toEqual([0, null]);
+    expect(await answers(places[1]!.port)).toBe(true);
+    expect(await end(children[1]!, "SIGTERM")).toEqual([0, null]);
+    for (const place of places) rmSync(place.state, { recursive: true, force: true });
+  });
+
+  it(`killed outright at ${KILLS} moments, the next start needs no repair`, async () => {
     const slowest = { seconds: 0 };
-    for (let turn = 0; turn < 20; turn += 1) {
+    for (let turn = 0; turn < KILLS; turn += 1) {
       // Every fifth time from nothing, so that the laying out of the database is cut as well.
       if (turn % 5 === 0) rmSync(join(state, "postgres"), { recursive: true, force: true });
       await end(await killedLater(turn), "SIGKILL");

@@ -39,7 +39,7 @@ function countOne(one: Counted): Promise<number> {
   const key = keyOf(one);
   return inTransaction(async (transaction) => {
     const now = fn("clock_timestamp") as unknown as Date; // becomes a moment in the statement
-    await Throttle.bulkCreate([{ key, tries: 0, since: now, lastAt: now }], { ignoreDuplicates: true, transaction });
+    await Throttle.bulkCreate([{ key, tries: 0, since: now, lastAt: now }], { fields: ["key", "tries", "since", "lastAt"], ignoreDuplicates: true, transaction });
     const attributes = { include: [[fn("clock_timestamp"), "now"] as [ReturnType<typeof fn>, string]] };
     const row = await Throttle.findOne({ where: { key }, attributes, lock: transaction.LOCK.UPDATE, rejectOnEmpty: true, transaction });
     const { wait, next } = judge(rules[one.rule], row, row.get("now") as unknown as Date); // asked for beside the columns

@@ -4,6 +4,9 @@ import { OUTDOOR_DEVIATION } from "../model/deviations";
 import type { Part, Parts } from "../sound/parts";
 import type { ReceiverVerdict } from "../verdict";
 
+/** Read once: a loop would ask the other module at every turn. */
+const BANDS = BAND_COUNT;
+
 /** Doubt of a level without any energy to judge by, dB. */
 const NO_ENERGY = 3;
 
@@ -26,9 +29,9 @@ function carriers({ sources, ways, entering }: Parts): Part[] {
 
 /** One standard deviation of a listener's level per band, dB: root of the summed squares of share times deviation. */
 export function doubtsOf(parts: Parts, energy: Float64Array): Float64Array {
-  const squares = new Float64Array(BAND_COUNT);
+  const squares = new Float64Array(BANDS);
   for (const part of carriers(parts)) {
-    for (let band = 0; band < BAND_COUNT; band += 1)
+    for (let band = 0; band < BANDS; band += 1)
       squares[band] += (part.energy[band] * deviationOf(part, band)) ** 2;
   }
   return squares.map((sum, band) => {

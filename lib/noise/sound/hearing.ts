@@ -8,6 +8,9 @@ import { directFactor } from "../rooms";
 import { roomIndexOf, type Field } from "./field";
 import { unknownAt, type SpreadFrom } from "./unknowns";
 
+/** Read once: a loop would ask the other module at every turn. */
+const BANDS = BAND_COUNT;
+
 /** An element by which sound from outdoors enters the listener's rooms. */
 export interface Entry {
   readonly element: ElementModel;
@@ -81,14 +84,14 @@ function ownOf(
   receiver: Receiver,
   room: number,
 ): Float64Array {
-  const own = new Float64Array(sources.length * BAND_COUNT);
+  const own = new Float64Array(sources.length * BANDS);
   for (const model of sources) {
     if (!model.injections.some((injection) => injection.room === room)) continue;
     const distance = model.source.spaceId === receiver.spaceId ? distanceTo(receiver, model) : null;
     const direct = distance === null ? 0 : directFactor(model.q, distance);
-    for (let band = 0; band < BAND_COUNT; band += 1) {
+    for (let band = 0; band < BANDS; band += 1) {
       const area = diagonal[band * count + room];
-      own[model.index * BAND_COUNT + band] = area > 0 ? direct + 4 / area : 0;
+      own[model.index * BANDS + band] = area > 0 ? direct + 4 / area : 0;
     }
   }
   return own;
@@ -100,7 +103,7 @@ function outdoorsOf(
   receiver: Receiver,
   entries: readonly Entry[],
 ): Float64Array {
-  const count = emitters.length * BAND_COUNT;
+  const count = emitters.length * BANDS;
   const outdoors = new Float64Array(count);
   const point = pointOfReceiver.get(receiver.id);
   if (point !== undefined) {
@@ -109,8 +112,8 @@ function outdoorsOf(
   }
   for (const { point: at, gain } of entries) {
     if (at < 0 || at >= points.length) continue;
-    for (let m = 0; m < count; m += BAND_COUNT) {
-      for (let band = 0; band < BAND_COUNT; band += 1)
+    for (let m = 0; m < count; m += BANDS) {
+      for (let band = 0; band < BANDS; band += 1)
         outdoors[m + band] += travel[at * count + m + band] * gain[band];
     }
   }
@@ -125,23 +128,23 @@ function energyOfSource(
   out: Float64Array,
 ): void {
   const { rooms, sources, emitters, inside, emitted } = field;
-  const at = source.index * BAND_COUNT;
+  const at = source.index * BANDS;
   for (const { room, energy } of source.injections) {
     if (room === parts.room)
-      for (let b = 0; b < BAND_COUNT; b += 1) out[at + b] += energy[b] * parts.own[at + b];
+      for (let b = 0; b < BANDS; b += 1) out[at + b] += energy[b] * parts.own[at + b];
   }
   for (const { from, gain } of parts.passages) {
-    const start = (source.index * rooms.length + from) * BAND_COUNT;
-    for (let b = 0; b < BAND_COUNT; b += 1) out[at + b] += inside[start + b] * gain[b];
+    const start = (source.index * rooms.length + from) * BANDS;
+    for (let b = 0; b < BANDS; b += 1) out[at + b] += inside[start + b] * gain[b];
   }
   for (let m = 0; m < emitters.length; m += 1) {
-    const start = (m * sources.length + source.index) * BAND_COUNT;
-    for (let b = 0; b < BAND_COUNT; b += 1)
-      out[at + b] += emitted[start + b] * parts.outdoors[m * BAND_COUNT + b];
+    const start = (m * sources.length + source.index) * BANDS;
+    for (let b = 0; b < BANDS; b += 1)
+      out[at + b] += emitted[start + b] * parts.outdoors[m * BANDS + b];
   }
   for (const { element, energy } of source.incidents) {
     const entry = parts.entries.find((each) => each.element.index === element);
-    if (entry) for (let b = 0; b < BAND_COUNT; b += 1) out[at + b] += energy[b] * entry.gain[b];
+    if (entry) for (let b = 0; b < BANDS; b += 1) out[at + b] += energy[b] * entry.gain[b];
   }
 }
 
@@ -162,7 +165,7 @@ export function hear(field: Field, receiver: Receiver, spread: SpreadFrom | null
     own: ownOf(field, receiver, room),
     outdoors: outdoorsOf(field, receiver, entries),
   };
-  const bySource = new Float64Array(field.sources.length * BAND_COUNT);
+  const bySource = new Float64Array(field.sources.length * BANDS);
   field.sources.forEach((source) => energyOfSource(field, parts, source, bySource));
   const unknown = field.sources.map((source) =>
     !parts.placed ? ALL_BANDS : spread ? unknownAt(field, source, room, spread) : 0,

@@ -6,6 +6,9 @@ import type { Field } from "./field";
 import type { Hearing } from "./hearing";
 import type { Playing } from "./playing";
 
+/** Read once: a loop would ask the other module at every turn. */
+const BANDS = BAND_COUNT;
+
 /** A share of a listener's energy that belongs to one thing: where it leaves, where it enters, or what makes it. */
 export interface Part {
   readonly what: "source" | "leaving" | "entering";
@@ -30,11 +33,14 @@ export interface Parts {
 
 /** One row of a table, each band times a factor of its own or times one for all. */
 function slice(table: Float64Array, index: number, factors: Float64Array | number): Float64Array {
-  const row = table.slice(index * BAND_COUNT, (index + 1) * BAND_COUNT);
-  for (let band = 0; band < BAND_COUNT; band += 1)
+  const row = table.slice(index * BANDS, (index + 1) * BANDS);
+  for (let band = 0; band < BANDS; band += 1)
     row[band] *= typeof factors === "number" ? factors : factors[band];
   return row;
 }
+
+/** One row of a table, not copied: nine numbers by themselves are too large to lie where small arrays are cheap. */
+const rowOf = (table: Float64Array, index: number) => table.subarray(index * BANDS, (index + 1) * BANDS);
 
 function elementPart(what: Part["what"], model: ElementModel, energy: Float64Array): Part {
   return {
@@ -90,7 +96,7 @@ function incidentParts({ sources }: Field, { entries }: Hearing, { weights }: Pl
   return sources.flatMap((model) => {
     const { source, incidents, index } = model;
     if (weights[index] === 0 || incidents.length === 0) return [];
-    const energy = new Float64Array(BAND_COUNT);
+    const energy = new Float64Array(BANDS);
     for (const incident of incidents) {
       const entry = entries.find(({ element }) => element.index === incident.element);
       if (entry)
@@ -121,9 +127,11 @@ function outdoorParts(
   { outdoors }: Hearing,
   { emitted, weights }: Playing,
 ): Part[] {
+  const all = new Float64Array(outdoors.length);
+  for (let i = 0; i < all.length; i += 1) all[i] = outdoors[i] * emitted[i];
   return emitters.flatMap(({ id, name, kind, element, source }, m): Part[] => {
     if (source >= 0 && weights[source] === 0) return [];
-    const energy = slice(outdoors, m, emitted.subarray(m * BAND_COUNT, (m + 1) * BAND_COUNT));
+    const energy = rowOf(all, m);
     return [
       { what: "leaving", id, name, kind, energy, element, source: source < 0 ? null : sources[source] },
     ];
@@ -131,12 +139,12 @@ function outdoorParts(
 }
 
 function entryParts({ entries }: Hearing, field: Field, { arriving, weights }: Playing): Part[] {
-  return entries.map(({ element, point, gain }) => {
-    const given = new Float64Array(BAND_COUNT);
-    if (point < 0) addGiven(field, element.index, weights, given);
-    const energy = gain.map(
-      (each, band) => each * (point < 0 ? given[band] : arriving[point * BAND_COUNT + band]),
-    );
+  const all = new Float64Array(entries.length * BANDS);
+  return entries.map(({ element, point, gain }, index) => {
+    const energy = rowOf(all, index);
+    if (point < 0) addGiven(field, element.index, weights, energy);
+    else energy.set(rowOf(arriving, point));
+    gain.forEach((each, band) => (energy[band] *= each));
     return elementPart("entering", element, energy);
   });
 }
@@ -154,7 +162,7 @@ function addGiven({ sources }: Field, element: number, weights: Float64Array, ou
 export function partsOf(field: Field, hearing: Hearing, playing: Playing): Parts {
   const leaving = outdoorParts(field, hearing, playing);
   const passing = passageParts(hearing, playing);
-  const outdoors = new Float64Array(BAND_COUNT);
+  const outdoors = new Float64Array(BANDS);
   for (const { energy } of leaving) energy.forEach((each, band) => (outdoors[band] += each));
   return {
     sources: sourceParts(field, hearing, playing),

@@ -2,6 +2,9 @@ import { BAND_COUNT } from "../bands";
 import type { Criterion, Situation } from "../plan";
 import type { Field } from "./field";
 
+/** Read once: a loop would ask the other module at every turn. */
+const BANDS = BAND_COUNT;
+
 /** Which sources sound, and how much of their energy counts. */
 export interface Playing {
   readonly situation: Situation | null;
@@ -33,19 +36,19 @@ function weightsOf(
 
 /** Weighted sum over sources of a table [(thing * sources + source) * bands + band]. */
 function mixBySource(table: Float64Array, things: number, weights: Float64Array): Float64Array {
-  const mixed = new Float64Array(things * BAND_COUNT);
+  const mixed = new Float64Array(things * BANDS);
   for (let i = 0; i < things; i += 1) {
     for (let s = 0; s < weights.length; s += 1) {
       if (weights[s] === 0) continue;
-      const at = (i * weights.length + s) * BAND_COUNT;
-      for (let b = 0; b < BAND_COUNT; b += 1) mixed[i * BAND_COUNT + b] += weights[s] * table[at + b];
+      const at = (i * weights.length + s) * BANDS;
+      for (let b = 0; b < BANDS; b += 1) mixed[i * BANDS + b] += weights[s] * table[at + b];
     }
   }
   return mixed;
 }
 
 function mixInside({ inside, rooms }: Field, weights: Float64Array): Float64Array {
-  const length = rooms.length * BAND_COUNT;
+  const length = rooms.length * BANDS;
   const mixed = new Float64Array(length);
   for (let s = 0; s < weights.length; s += 1)
     for (let i = 0; i < length; i += 1) mixed[i] += weights[s] * inside[s * length + i];
@@ -57,19 +60,19 @@ function arrivingOf(
   emitted: Float64Array,
   weights: Float64Array,
 ): Float64Array {
-  const arriving = new Float64Array(points.length * BAND_COUNT);
+  const arriving = new Float64Array(points.length * BANDS);
   for (let p = 0; p < points.length; p += 1) {
-    const start = p * emitters.length * BAND_COUNT;
-    for (let m = 0; m < emitted.length; m += BAND_COUNT) {
-      for (let b = 0; b < BAND_COUNT; b += 1)
-        arriving[p * BAND_COUNT + b] += emitted[m + b] * travel[start + m + b];
+    const start = p * emitters.length * BANDS;
+    for (let m = 0; m < emitted.length; m += BANDS) {
+      for (let b = 0; b < BANDS; b += 1)
+        arriving[p * BANDS + b] += emitted[m + b] * travel[start + m + b];
     }
   }
   for (const { index, incidents } of sources) {
     for (const { element, energy } of incidents) {
       const point = pointOfElement.get(element);
       if (point !== undefined)
-        energy.forEach((each, b) => (arriving[point * BAND_COUNT + b] += weights[index] * each));
+        energy.forEach((each, b) => (arriving[point * BANDS + b] += weights[index] * each));
     }
   }
   return arriving;
