@@ -90,7 +90,7 @@ describe("an acoustician's change, stage by stage, each seen in the strip and ta
     await expect.poll(strip).toMatch(/worse than before/);
     await page.getByRole("button", { name: "Undo" }).click();
     await expect.poll(standing).toBe(drawn);
-    expect(await finish.getByRole("button", { name: "Own surfaces" }).getAttribute("aria-pressed")).toBe("true");
+    expect(await finish.getByRole("button", { name: "Own figures" }).getAttribute("aria-pressed")).toBe("true");
     expect(complaints).toEqual([]);
   });
 });

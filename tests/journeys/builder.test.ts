@@ -26,8 +26,15 @@ async function open(path: string): Promise<void> {
 
 const main = () => page.locator("main");
 
-/** Every field but those of the air of a room, which are there to be tried and keep nothing; and everything that does nothing. */
-const changing = () => main().locator("input, textarea, select").evaluateAll((fields) => fields.filter((field) => field.closest("section")?.querySelector("h2")?.textContent !== "Air").map((field) => field.outerHTML.slice(0, 160)));
+/** Every field but what only turns the page: the air of a room, there to be tried and kept nowhere, and the band a chart shows. */
+const changing = () =>
+  main()
+    .locator("input, textarea, select")
+    .evaluateAll((fields) => {
+      const tried = (field: Element) => field.closest("section")?.querySelector("h2")?.textContent === "Air";
+      const shows = (field: Element) => field.id !== "" && document.querySelector(`label[for="${CSS.escape(field.id)}"]`)?.textContent === "Band";
+      return fields.filter((field) => !tried(field) && !shows(field)).map((field) => field.outerHTML.slice(0, 160));
+    });
 const dead = () => main().locator("button, a, summary").evaluateAll((controls) => controls.filter((one) => one.matches(":disabled, [aria-disabled=true], a:not([href])")).map((one) => one.outerHTML.slice(0, 160)));
 const verbs = /^(add|remove|duplicate|draw|choose|use|copy|undo|save|measure|type|replace|put)\b/i;
 
